@@ -1,4 +1,6 @@
-/** The commands: the only place that prints or exits. Entry point: {@link org.foreseal.cli.Main}. */
+/**
+ * The commands: the only place that prints or exits. Entry point: {@link org.foreseal.cli.Main}.
+ */
 @NullMarked
 package org.foreseal.cli;
 
