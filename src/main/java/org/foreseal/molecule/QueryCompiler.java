@@ -66,7 +66,10 @@ final class QueryCompiler {
       Expr expr = ((QueryBond) unwrap(bond)).getExpression();
       bonds.add(
           new QueryGraph.Bond(
-              bond.getBegin().getIndex(), bond.getEnd().getIndex(), bondTest(expr), written(expr)));
+              query.indexOf(bond.getBegin()),
+              query.indexOf(bond.getEnd()),
+              bondTest(expr),
+              written(expr)));
     }
     return new QueryGraph(atoms, bonds);
   }
