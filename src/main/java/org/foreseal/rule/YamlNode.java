@@ -171,6 +171,16 @@ public final class YamlNode {
     return get(key).orElseThrow(() -> complaint("'" + key + "' is missing", "add it"));
   }
 
+  /** Whether this piece is a list. */
+  public boolean isList() {
+    return kind == Kind.LIST;
+  }
+
+  /** Whether this piece is a mapping. */
+  public boolean isMap() {
+    return kind == Kind.MAP;
+  }
+
   /** The elements of this list. */
   public List<YamlNode> items() {
     if (kind != Kind.LIST) {
