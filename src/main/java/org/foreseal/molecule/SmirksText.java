@@ -28,33 +28,14 @@ final class SmirksText {
       throw new IllegalArgumentException("a SMIRKS has reactants, '>>' and products");
     }
     SmirksText text = new SmirksText(smirks);
-    for (String piece : splitPieces(sides[0])) {
+    for (String piece : SmartsPieces.split(sides[0])) {
       text.readReactant(QueryCompiler.compile(piece));
     }
-    for (String piece : splitPieces(sides[1])) {
+    for (String piece : SmartsPieces.split(sides[1])) {
       text.readProduct(QueryCompiler.compile(piece));
     }
     text.checkProductsComplete();
     return text;
-  }
-
-  /**
-   * Splits at dots outside brackets; SMARTS inside {@code $(...)} never hold one in this project.
-   */
-  private static List<String> splitPieces(String side) {
-    List<String> pieces = new ArrayList<>();
-    int depth = 0;
-    int start = 0;
-    for (int i = 0; i < side.length(); i++) {
-      char c = side.charAt(i);
-      depth += c == '[' || c == '(' ? 1 : c == ']' || c == ')' ? -1 : 0;
-      if (c == '.' && depth == 0) {
-        pieces.add(side.substring(start, i));
-        start = i + 1;
-      }
-    }
-    pieces.add(side.substring(start));
-    return pieces;
   }
 
   private void readReactant(QueryGraph graph) {

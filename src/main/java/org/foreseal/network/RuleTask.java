@@ -149,12 +149,25 @@ final class RuleTask {
     }
     List<Molecule> reactants =
         Arrays.stream(chosen).mapToObj(id -> view.species(id).molecule()).toList();
-    if (rule.pairs(reactants)) {
+    if (rule.pairs(reactants) && isWorthApplying(view, chosen, reactants)) {
       int depth = Arrays.stream(chosen).map(id -> view.species(id).depth()).max().orElse(0) + 1;
       for (Outcome outcome : rule.transformation().apply(reactants)) {
         consider(view, new Proposal(rule, chosen, shared(view, outcome)), reactants, depth, found);
       }
     }
+  }
+
+  /**
+   * A guard that looks at reactants only is asked before the reaction is carried out. Where it
+   * refuses, the products are still worked out for the list of what was ruled out when something
+   * that was charged takes part; the countless refused meetings of products with products are not.
+   */
+  private boolean isWorthApplying(DepthView view, int[] chosen, List<Molecule> reactants) {
+    boolean chargedTakesPart =
+        Arrays.stream(chosen)
+            .mapToObj(view::species)
+            .anyMatch(s -> s.depth() == 0 && !isAmbient(s));
+    return chargedTakesPart || !rule.refusesReactants(reactants, surroundings);
   }
 
   private static Outcome shared(DepthView view, Outcome outcome) {

@@ -120,6 +120,9 @@ public record Rule(
   }
 
   private static String inWords(Set<Provision> all) {
+    if (all.isEmpty()) {
+      return "heat alone";
+    }
     return String.join(" with ", all.stream().sorted().map(Provision::word).toList());
   }
 
@@ -131,6 +134,12 @@ public record Rule(
       case IDENTICAL -> different == 1;
       case DISTINCT -> different == reactants.size();
     };
+  }
+
+  /** Whether a guard refuses these reactants whatever the products would be. */
+  public boolean refusesReactants(List<Molecule> reactants, Surroundings run) {
+    Guard.Attempt attempt = new Guard.Attempt(reactants, List.of(), run);
+    return guards.stream().anyMatch(g -> g.refuses(attempt));
   }
 
   /** The first guard that refuses the attempt. */
