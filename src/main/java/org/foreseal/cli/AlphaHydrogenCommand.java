@@ -21,7 +21,9 @@ import picocli.CommandLine.Spec;
     name = "alpha-h",
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
+    sortOptions = false,
     synopsisHeading = "Usage: ",
+    customSynopsis = "foreseal alpha-h ACID... [OPTIONS]",
     header = "Which of these acids can ketonize, alone and crossed, and why not.",
     footer = {
       "",

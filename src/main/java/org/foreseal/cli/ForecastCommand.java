@@ -26,7 +26,9 @@ import picocli.CommandLine.Spec;
     name = "forecast",
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
+    sortOptions = false,
     synopsisHeading = "Usage: ",
+    customSynopsis = "foreseal forecast [RUN.yaml | SUBSTRATE...] [OPTIONS]",
     header = "What will this run show in the GC, ranked; what not, and why.",
     footer = {
       "",

@@ -26,7 +26,9 @@ import picocli.CommandLine.Spec;
     name = "routes",
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
+    sortOptions = false,
     synopsisHeading = "Usage: ",
+    customSynopsis = "foreseal routes [RUN.yaml | SUBSTRATE...] --to PRODUCT [OPTIONS]",
     header = "How does a product come about: steps, rules, dG with error, what each needs.",
     footer = {
       "",

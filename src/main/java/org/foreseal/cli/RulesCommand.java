@@ -24,6 +24,7 @@ import picocli.CommandLine.Spec;
     name = "rules",
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
+    sortOptions = false,
     synopsisHeading = "Usage: ",
     customSynopsis = "foreseal rules (list | show ID | check [DIR]) [OPTIONS]",
     header = "List, show or check the rules, built-in ones or your own folder.",

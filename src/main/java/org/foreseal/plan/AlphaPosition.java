@@ -30,7 +30,9 @@ record AlphaPosition(
     int hydrogens = m.hydrogens(alpha);
     if (m.isAromatic(alpha)) {
       return blocked(
-          "aromatic ring carbon", hydrogens, "the carboxyl group sits on an aromatic ring");
+          "aromatic ring carbon",
+          hydrogens,
+          "no alpha-H: the carboxyl group sits on an aromatic ring");
     }
     if (isCarboxylCarbon(alpha, all)) {
       return blocked("carboxyl carbon", hydrogens, "oxalic acid: it loses CO2 and CO instead");

@@ -6,12 +6,16 @@ import java.util.Optional;
 import java.util.Set;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.Smiles;
+import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
 import org.foreseal.rule.Provision;
 import org.foreseal.run.RunSheet.Additive;
 
 /** Acids, bases, salts, oxidants, gases and hydrogen donors by their usual names. */
 public final class AdditiveCatalogue {
+  /** A formula that is the SMILES of another molecule. */
+  private static final String AMBIGUOUS = "CO";
+
   private final Catalogue table;
 
   private AdditiveCatalogue(Catalogue table) {
@@ -39,7 +43,16 @@ public final class AdditiveCatalogue {
       StructureReader structures,
       Place place,
       List<String> notes) {
+    if (AMBIGUOUS.equals(name) && smiles.isEmpty()) {
+      throw new BadInputException(
+          place,
+          "CO could be carbon monoxide or methanol",
+          "write its name; as a SMILES CO is methanol, [C-]#[O+] carbon monoxide");
+    }
     Optional<Catalogue.Entry> known = table.find(name);
+    if (known.isPresent() && smiles.isPresent()) {
+      refuseDisagreement(known.get(), smiles.get(), place);
+    }
     if (known.isPresent() && smiles.isEmpty()) {
       return additive(known.get(), statedRoles);
     }
@@ -52,6 +65,15 @@ public final class AdditiveCatalogue {
     StructureReader.Structure read = structures.read(name, place);
     notes.addAll(read.notes());
     return molecule(read.name(), read.molecule(), statedRoles, notes);
+  }
+
+  private static void refuseDisagreement(Catalogue.Entry entry, Molecule given, Place place) {
+    if (!entry.smiles().isEmpty() && !Smiles.read(entry.smiles()).equals(given)) {
+      throw new BadInputException(
+          place,
+          "name and smiles disagree: " + entry.name() + " is " + entry.smiles(),
+          "keep the one that is meant");
+    }
   }
 
   private static Additive additive(Catalogue.Entry entry, Set<Provision> statedRoles) {
