@@ -17,7 +17,8 @@ import org.foreseal.rule.Surroundings;
  * small ones that are always about, and what solids, additives, medium and temperature offer.
  *
  * <p>Hydrogen is always offered, since every organic run makes some; the ranking asks how much. A
- * carboxylic acid among the substrates makes the run acid. Homolysis opens above {@link
+ * carboxylic acid among the substrates makes the run acid. Air is an oxidant too, and water among the
+ * additives counts as water. Homolysis opens above {@link
  * #HOMOLYSIS_CELSIUS}.
  *
  * @param surroundings what the rules are told
@@ -56,7 +57,10 @@ public record ChargedVessel(Surroundings surroundings, List<Molecule> molecules)
     Set<Provision> offered = EnumSet.of(Provision.HYDROGEN);
     sheet.solids().forEach(s -> offered.addAll(s.roles()));
     sheet.additives().forEach(a -> offered.addAll(a.roles()));
-    if (sheet.inWater()) {
+    if (offered.contains(Provision.AIR)) {
+      offered.add(Provision.OXIDANT);
+    }
+    if (sheet.inWater() || charged.contains(AmbientSpecies.WATER)) {
       offered.add(Provision.WATER);
     }
     if (charged.stream().anyMatch(CARBOXYLIC_ACID::isIn)) {
