@@ -11,7 +11,7 @@ import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
-import java.util.function.Consumer;
+import java.util.function.IntConsumer;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.rule.Rule;
 import org.foreseal.rule.RuleLibrary;
@@ -33,7 +33,7 @@ public final class NetworkExpansion {
   private final Surroundings surroundings;
   private final StepPruner pruner;
   private final Limits limits;
-  private final Consumer<String> progress;
+  private final IntConsumer progress;
 
   private final List<Species> species = new ArrayList<>();
   private final Map<Molecule, Integer> ids = new HashMap<>();
@@ -51,14 +51,14 @@ public final class NetworkExpansion {
    * @param surroundings what the run offers
    * @param pruner judges every step
    * @param limits where to end
-   * @param progress told in words how far it is
+   * @param progress told the number of species after each depth
    */
   public NetworkExpansion(
       RuleLibrary library,
       Surroundings surroundings,
       StepPruner pruner,
       Limits limits,
-      Consumer<String> progress) {
+      IntConsumer progress) {
     this.library = library;
     this.surroundings = surroundings;
     this.pruner = pruner;
@@ -109,8 +109,7 @@ public final class NetworkExpansion {
       DepthView view = new DepthView(frozen, from, ids, pruner, deadline);
       List<RuleTask.Found> results = runAll(tasks, view, pool);
       boolean outOfTime = mergeAll(results, depth + 1);
-      progress.accept(
-          "depth " + (depth + 1) + ": " + species.size() + " species, " + steps.size() + " steps");
+      progress.accept(species.size());
       if (outOfTime || speciesLimitReached) {
         String limit =
             outOfTime

@@ -21,7 +21,8 @@ import org.foreseal.quantity.Place;
  * @param window temperatures
  * @param prominence 1 core, 2 usual, 3 marginal
  * @param reverse id of the rule that runs backwards
- * @param standsFor the chain of rules this net rule sums up; never add the rates of both
+ * @param standsFor given for a net rule: the chain of rules it sums up, empty when its steps have
+ *     none; never add the rates of both
  * @param pairing whether its reactants must be the same or different molecules
  * @param guards conditions that refuse a site
  * @param nearMisses products one might expect in vain
@@ -43,7 +44,7 @@ public record Rule(
     Window window,
     int prominence,
     Optional<String> reverse,
-    List<String> standsFor,
+    Optional<List<String>> standsFor,
     Pairing pairing,
     List<Guard> guards,
     List<NearMiss> nearMisses,
@@ -69,7 +70,7 @@ public record Rule(
     needs = List.copyOf(needs);
     marginalNeeds = List.copyOf(marginalNeeds);
     helpedBy = Set.copyOf(helpedBy);
-    standsFor = List.copyOf(standsFor);
+    standsFor = standsFor.map(List::copyOf);
     guards = List.copyOf(guards);
     nearMisses = List.copyOf(nearMisses);
     sources = List.copyOf(sources);

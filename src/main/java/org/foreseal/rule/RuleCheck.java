@@ -80,7 +80,7 @@ public final class RuleCheck {
     rule.reverse()
         .filter(r -> !ids.contains(r))
         .ifPresent(r -> problems.add("reverse '" + r + "' is no rule"));
-    rule.standsFor().stream()
+    rule.standsFor().orElse(List.of()).stream()
         .filter(r -> !ids.contains(r))
         .forEach(r -> problems.add("stands-for '" + r + "' is no rule"));
     return problems;

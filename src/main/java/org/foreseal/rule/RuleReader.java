@@ -84,7 +84,7 @@ final class RuleReader {
         window(n),
         n.require("prominence").integer(1, 3),
         n.get("reverse").map(YamlNode::text),
-        n.itemsOf("stands-for").stream().map(YamlNode::text).toList(),
+        n.get("stands-for").map(RuleReader::texts),
         pairing(n),
         n.itemsOf("guards").stream()
             .map(g -> GuardReader.read(g, transformation.reactantCount()))

@@ -17,9 +17,8 @@ import org.foreseal.rule.Surroundings;
  * small ones that are always about, and what solids, additives, medium and temperature offer.
  *
  * <p>Hydrogen is always offered, since every organic run makes some; the ranking asks how much. A
- * carboxylic acid among the substrates makes the run acid. Air is an oxidant too, and water among the
- * additives counts as water. Homolysis opens above {@link
- * #HOMOLYSIS_CELSIUS}.
+ * carboxylic acid among the substrates makes the run acid. Air is an oxidant too, and water among
+ * the additives counts as water. Homolysis opens above {@link #HOMOLYSIS_CELSIUS}.
  *
  * @param surroundings what the rules are told
  * @param molecules the molecules at the start, substrates first
