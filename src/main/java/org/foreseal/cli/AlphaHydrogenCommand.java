@@ -4,11 +4,11 @@ import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.Callable;
+import org.foreseal.molecule.ReadMolecule;
 import org.foreseal.plan.AlphaHydrogenCheck;
 import org.foreseal.plan.AlphaHydrogenReport;
 import org.foreseal.quantity.Place;
 import org.foreseal.report.AlphaHydrogenWriter;
-import org.foreseal.run.StructureReader;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
@@ -31,7 +31,7 @@ import picocli.CommandLine.Spec;
       "  foreseal alpha-h \"phenylacetic acid\" \"benzoic acid\"",
       "  foreseal alpha-h \"CC(C)(C(=O)O)c1ccccc1\" \"CC(=O)O\" --format json",
       "",
-      "Units: none; the check looks at structures only, whatever the temperature.",
+      "Units: none; the check looks at molecules only, whatever the temperature.",
       ExitCode.HELP_1,
       ExitCode.HELP_2
     })
@@ -65,11 +65,11 @@ final class AlphaHydrogenCommand implements Callable<Integer> {
     List<AlphaHydrogenCheck.Given> given = new ArrayList<>();
     for (String acid : acids) {
       Place place = Place.onCommandLine(acid, 1);
-      StructureReader.Structure read = session.structures().read(acid, place);
+      ReadMolecule read = session.molecules().read(acid, place);
       console.notes(read.notes());
       given.add(new AlphaHydrogenCheck.Given(read.name(), read.molecule(), place));
     }
-    AlphaHydrogenReport report = new AlphaHydrogenCheck(session.names()).check(given);
+    AlphaHydrogenReport report = new AlphaHydrogenCheck(session.names()::display).check(given);
     console.result(
         switch (format) {
           case TEXT -> AlphaHydrogenWriter.text(report);

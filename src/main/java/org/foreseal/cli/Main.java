@@ -2,11 +2,9 @@ package org.foreseal.cli;
 
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
-import java.util.List;
-import org.foreseal.molecule.Molecule;
-import org.foreseal.molecule.Smiles;
+import org.foreseal.molecule.MoleculeNames;
+import org.foreseal.molecule.MoleculeReader;
 import org.foreseal.run.Engine;
-import org.foreseal.run.StructureReader;
 import picocli.CommandLine;
 
 /** Starts the command line. */
@@ -22,24 +20,18 @@ public final class Main {
   }
 
   private static Session session() {
+    MoleculeNames names = MoleculeNames.builtIn();
     return new Session(
-        Main::engine, structures(), Molecule::smiles, System.in, isTerminal(), System::nanoTime);
-  }
-
-  /** Up to Java 21 there is a console only when a person sits at the terminal. */
-  @SuppressWarnings("SystemConsoleNull")
-  private static boolean isTerminal() {
-    return System.console() != null;
+        Main::engine, new MoleculeReader(names), names, System.in, isTerminal(), System::nanoTime);
   }
 
   private static Engine engine() {
     throw new UnsupportedOperationException("the forecast engine is not part of this build");
   }
 
-  private static StructureReader structures() {
-    return (text, place) -> {
-      List<Molecule> molecules = Smiles.readAll(text, place);
-      return new StructureReader.Structure(molecules.get(0), text, List.of());
-    };
+  /** Up to Java 21 there is a console only when a person sits at the terminal. */
+  @SuppressWarnings("SystemConsoleNull")
+  private static boolean isTerminal() {
+    return System.console() != null;
   }
 }

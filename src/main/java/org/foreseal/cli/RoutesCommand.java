@@ -92,7 +92,7 @@ final class RoutesCommand implements Callable<Integer> {
     RunSheet sheet = single(run.read(session));
     Optional<Molecule> target =
         Optional.ofNullable(product)
-            .map(p -> session.structures().read(p, Place.onCommandLine("--to " + p, 6)).molecule());
+            .map(p -> session.molecules().read(p, Place.onCommandLine("--to " + p, 6)).molecule());
     Engine engine = session.engine().get();
     if (format == Format.GRAPHML || format == Format.DOT) {
       DrawingFormat drawing = DrawingFormat.valueOf(format.name());

@@ -114,7 +114,7 @@ final class RunArguments {
   /** The runs asked for, one for each solid and temperature. */
   List<RunReader.Variant> read(Session session) throws IOException {
     Optional<String> sheet = sheetArgument();
-    RunReader reader = new RunReader(session.structures());
+    RunReader reader = new RunReader(session.molecules());
     return sheet.isPresent()
         ? reader.read(Optional.of(sheet(sheet.get(), session)), options())
         : reader.read(Optional.empty(), options());

@@ -1,18 +1,17 @@
 package org.foreseal.cli;
 
 import java.io.InputStream;
-import java.util.function.Function;
 import java.util.function.LongSupplier;
 import java.util.function.Supplier;
-import org.foreseal.molecule.Molecule;
+import org.foreseal.molecule.MoleculeNames;
+import org.foreseal.molecule.MoleculeReader;
 import org.foreseal.run.Engine;
-import org.foreseal.run.StructureReader;
 
 /**
  * What the commands work with. Tests put their own in.
  *
  * @param engine the calculations, made on first use because loading the rules takes time
- * @param structures reads names and SMILES
+ * @param molecules reads names and SMILES
  * @param names what a chemist would call a molecule
  * @param input standard input, for {@code -}
  * @param isTerminal whether a person watches standard error
@@ -20,8 +19,8 @@ import org.foreseal.run.StructureReader;
  */
 record Session(
     Supplier<Engine> engine,
-    StructureReader structures,
-    Function<Molecule, String> names,
+    MoleculeReader molecules,
+    MoleculeNames names,
     InputStream input,
     boolean isTerminal,
     LongSupplier nanoTime) {}

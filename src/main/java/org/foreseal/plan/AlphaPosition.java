@@ -39,7 +39,7 @@ record AlphaPosition(
     }
     Optional<String> multiple = multipleBond(m, alpha);
     if (multiple.isPresent()) {
-      return blocked(multiple.get(), hydrogens, unsaturatedReason(multiple.get()));
+      return unsaturated(multiple.get(), hydrogens);
     }
     return tetrahedral(m, carboxyl, alpha, all);
   }
@@ -68,13 +68,20 @@ record AlphaPosition(
     return new AlphaPosition(kind, hydrogens, false, reason, Optional.empty());
   }
 
+  private static AlphaPosition unsaturated(String kind, int hydrogens) {
+    Optional<String> caution =
+        "C=O carbon".equals(kind)
+            ? Optional.of("an alpha-keto acid loses CO2 or CO before it ketonizes")
+            : Optional.empty();
+    return new AlphaPosition(kind, hydrogens, false, unsaturatedReason(kind), caution);
+  }
+
   private static String unsaturatedReason(String kind) {
     return switch (kind) {
-      case "C=O carbon" ->
-          "the alpha carbon is a carbonyl: an alpha-keto acid loses CO2 or CO first";
-      case "C=C carbon" -> "the alpha carbon is part of C=C; a vinylic H gives no enolate";
-      case "alkyne carbon" -> "the alpha carbon is part of a triple bond";
-      default -> "the alpha carbon is doubly bonded to a hetero atom";
+      case "C=O carbon" -> "no alpha-H to lose: the alpha carbon is a carbonyl";
+      case "C=C carbon" -> "no alpha-H to lose: the alpha carbon is part of C=C";
+      case "alkyne carbon" -> "no alpha-H: the alpha carbon is part of a triple bond";
+      default -> "no alpha-H to lose: the alpha carbon is doubly bonded to a hetero atom";
     };
   }
 

@@ -102,9 +102,15 @@ public final class AlphaHydrogenWriter {
     text.append(heading);
     for (Ketone pair : pairs) {
       String head = "  " + (pair.first() + 1) + " + " + (pair.second() + 1) + "  ";
-      String product = pair.ketone().map(k -> pair.name() + ", " + k.formula() + ": ").orElse("");
+      String product = pair.ketone().map(k -> nameAndFormula(pair, k) + ": ").orElse("");
       text.append(Wrap.paragraph(head, product + pair.reason(), WIDTH));
     }
+  }
+
+  /** The SMILES stands in for a name where there is none but the formula. */
+  private static String nameAndFormula(Ketone pair, Molecule ketone) {
+    String formula = ketone.formula().toString();
+    return (pair.name().equals(formula) ? ketone.smiles() : pair.name()) + ", " + formula;
   }
 
   private static String yesOrNo(boolean value) {

@@ -5,6 +5,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.foreseal.molecule.Molecule;
+import org.foreseal.molecule.MoleculeReader;
+import org.foreseal.molecule.ReadMolecule;
 import org.foreseal.molecule.Smiles;
 import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
@@ -40,7 +42,7 @@ public final class AdditiveCatalogue {
       String name,
       Optional<Molecule> smiles,
       Set<Provision> statedRoles,
-      StructureReader structures,
+      MoleculeReader molecules,
       Place place,
       List<String> notes) {
     if (AMBIGUOUS.equals(name) && smiles.isEmpty()) {
@@ -62,7 +64,7 @@ public final class AdditiveCatalogue {
     if (smiles.isPresent()) {
       return molecule(name, smiles.get(), statedRoles, notes);
     }
-    StructureReader.Structure read = structures.read(name, place);
+    ReadMolecule read = molecules.read(name, place);
     notes.addAll(read.notes());
     return molecule(read.name(), read.molecule(), statedRoles, notes);
   }

@@ -9,6 +9,8 @@ import java.util.OptionalLong;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import org.foreseal.molecule.MoleculeReader;
+import org.foreseal.molecule.ReadMolecule;
 import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
 import org.foreseal.rule.Provision;
@@ -23,12 +25,12 @@ final class OptionReader {
   private static final Pattern ROLES_AT_END = Pattern.compile("(.*\\S)\\s*\\[([a-z, -]*)]");
   private static final String NO_SOLID = "none";
 
-  private final StructureReader structures;
+  private final MoleculeReader molecules;
   private final SolidCatalogue solids;
   private final AdditiveCatalogue additives;
 
-  OptionReader(StructureReader structures, SolidCatalogue solids, AdditiveCatalogue additives) {
-    this.structures = structures;
+  OptionReader(MoleculeReader molecules, SolidCatalogue solids, AdditiveCatalogue additives) {
+    this.molecules = molecules;
     this.solids = solids;
     this.additives = additives;
   }
@@ -114,7 +116,7 @@ final class OptionReader {
     Place place = Place.onCommandLine(text, 1);
     Parts parts = parts(text);
     Optional<Amount> amount = parts.amount().map(a -> Measures.amount(a, parts.amountPlace(place)));
-    StructureReader.Structure read = structures.read(parts.name(), place);
+    ReadMolecule read = molecules.read(parts.name(), place);
     return new Given<>(new Substrate(read.name(), read.molecule(), amount), place, read.notes());
   }
 
@@ -125,7 +127,7 @@ final class OptionReader {
     List<String> notes = new ArrayList<>();
     Optional<Amount> amount = parts.amount().map(a -> Measures.amount(a, parts.amountPlace(place)));
     Additive known =
-        additives.read(named.name(), Optional.empty(), named.roles(), structures, place, notes);
+        additives.read(named.name(), Optional.empty(), named.roles(), molecules, place, notes);
     return new Given<>(
         new Additive(known.name(), known.molecule(), known.roles(), amount), place, notes);
   }

@@ -3,6 +3,7 @@ package org.foreseal.run;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.foreseal.molecule.MoleculeReader;
 import org.foreseal.quantity.Place;
 
 /** Makes runs from a run sheet, from options, or from both; options win. */
@@ -13,13 +14,13 @@ public final class RunReader {
   /**
    * A reader.
    *
-   * @param structures reads names and SMILES
+   * @param molecules reads names and SMILES
    */
-  public RunReader(StructureReader structures) {
+  public RunReader(MoleculeReader molecules) {
     SolidCatalogue solids = SolidCatalogue.builtIn();
     AdditiveCatalogue additives = AdditiveCatalogue.builtIn();
-    this.sheets = new RunSheetReader(structures, solids, additives);
-    this.options = new OptionReader(structures, solids, additives);
+    this.sheets = new RunSheetReader(molecules, solids, additives);
+    this.options = new OptionReader(molecules, solids, additives);
   }
 
   /**

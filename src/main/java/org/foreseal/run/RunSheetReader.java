@@ -7,6 +7,8 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import org.foreseal.molecule.Molecule;
+import org.foreseal.molecule.MoleculeReader;
+import org.foreseal.molecule.ReadMolecule;
 import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
 import org.foreseal.rule.Provision;
@@ -45,12 +47,15 @@ final class RunSheetReader {
   private static final List<String> ADDITIVE_KEYS =
       List.of("name", "smiles", "acts_as", "molality", "milligrams", "millimoles", "pressure_bar");
 
-  private final StructureReader structures;
+  /** Shorter labels, such as A or CO, are not taken for names. */
+  private static final int SHORTEST_NAME = 4;
+
+  private final MoleculeReader molecules;
   private final SolidCatalogue solids;
   private final AdditiveCatalogue additives;
 
-  RunSheetReader(StructureReader structures, SolidCatalogue solids, AdditiveCatalogue additives) {
-    this.structures = structures;
+  RunSheetReader(MoleculeReader molecules, SolidCatalogue solids, AdditiveCatalogue additives) {
+    this.molecules = molecules;
     this.solids = solids;
     this.additives = additives;
   }
@@ -145,9 +150,32 @@ final class RunSheetReader {
   private Given<Substrate> substrate(
       YamlNode.Scalar structure, Optional<YamlNode.Scalar> label, Optional<Amount> amount) {
     Place place = SheetFields.inside(structure);
-    StructureReader.Structure read = structures.read(structure.text().strip(), place);
+    ReadMolecule read = molecules.read(structure.text().strip(), place);
+    label.ifPresent(l -> refuseDisagreement(l, read.molecule()));
     String shown = label.map(l -> l.text().strip()).orElse(read.name());
     return new Given<>(new Substrate(shown, read.molecule(), amount), place, read.notes());
+  }
+
+  /** A label may be anything, but a name of another molecule is a slip. */
+  private void refuseDisagreement(YamlNode.Scalar label, Molecule given) {
+    String text = label.text().strip();
+    Optional<ReadMolecule> named =
+        text.length() < SHORTEST_NAME ? Optional.empty() : readable(text, label.place());
+    if (named.filter(n -> n.notes().isEmpty() && !n.molecule().equals(given)).isPresent()) {
+      throw new BadInputException(
+          SheetFields.inside(label),
+          "name and smiles disagree: " + text + " is " + named.orElseThrow().molecule().smiles(),
+          "keep the one that is meant");
+    }
+  }
+
+  private Optional<ReadMolecule> readable(String text, Place place) {
+    try {
+      return Optional.of(molecules.read(text, place));
+    } catch (BadInputException notAName) {
+      // A label such as "acid of plate 2" names no molecule, and need not.
+      return Optional.empty();
+    }
   }
 
   private Given<Solid> solid(YamlNode node) {
@@ -173,7 +201,7 @@ final class RunSheetReader {
     if (node instanceof YamlNode.Scalar scalar) {
       Place place = SheetFields.inside(wanted(scalar, "additives"));
       String name = scalar.text().strip();
-      Additive known = additives.read(name, Optional.empty(), Set.of(), structures, place, notes);
+      Additive known = additives.read(name, Optional.empty(), Set.of(), molecules, place, notes);
       return new Given<>(known, place, notes);
     }
     SheetFields fields = new SheetFields(node, "additive", ADDITIVE_KEYS);
@@ -185,7 +213,7 @@ final class RunSheetReader {
     Optional<Molecule> molecule = smiles.map(s -> molecule(s, notes));
     Place place = SheetFields.inside(name);
     Additive known =
-        additives.read(name.text().strip(), molecule, roles(fields), structures, place, notes);
+        additives.read(name.text().strip(), molecule, roles(fields), molecules, place, notes);
     Optional<Amount> amount =
         amount(fields, List.of("molality", "milligrams", "millimoles", "pressure_bar"));
     return new Given<>(
@@ -193,8 +221,7 @@ final class RunSheetReader {
   }
 
   private Molecule molecule(YamlNode.Scalar smiles, List<String> notes) {
-    StructureReader.Structure read =
-        structures.read(smiles.text().strip(), SheetFields.inside(smiles));
+    ReadMolecule read = molecules.read(smiles.text().strip(), SheetFields.inside(smiles));
     notes.addAll(read.notes());
     return read.molecule();
   }

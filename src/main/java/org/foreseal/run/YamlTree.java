@@ -13,6 +13,7 @@ import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
 
@@ -58,7 +59,7 @@ final class YamlTree {
       return root;
     } catch (JsonProcessingException e) {
       throw new BadInputException(
-          place(source, lines, e.getLocation()), "not valid YAML: " + firstLine(e), SYNTAX_HINT);
+          place(source, lines, e.getLocation()), "not valid YAML: " + problem(e), SYNTAX_HINT);
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }
@@ -153,13 +154,14 @@ final class YamlTree {
     return new Place(source, line, Math.max(0, location.getColumnNr()), text);
   }
 
-  /** The parser's own words without the places it adds. */
-  private static String firstLine(JsonProcessingException e) {
-    return String.valueOf(e.getOriginalMessage())
-        .lines()
-        .map(String::strip)
-        .filter(line -> !line.isEmpty() && !line.startsWith("in 'reader'"))
-        .findFirst()
-        .orElse("it cannot be read");
+  /** The parser's own words without the places and excerpts it adds, which are indented. */
+  private static String problem(JsonProcessingException e) {
+    String text =
+        String.valueOf(e.getOriginalMessage())
+            .lines()
+            .filter(line -> !line.isBlank() && !Character.isWhitespace(line.charAt(0)))
+            .map(String::strip)
+            .collect(Collectors.joining(", "));
+    return text.isEmpty() ? "it cannot be read" : text;
   }
 }

@@ -5,9 +5,9 @@ import java.io.PrintWriter;
 import java.io.StringWriter;
 import java.nio.charset.StandardCharsets;
 import java.util.function.Supplier;
-import org.foreseal.molecule.Molecule;
+import org.foreseal.molecule.MoleculeNames;
+import org.foreseal.molecule.MoleculeReader;
 import org.foreseal.run.Engine;
-import org.foreseal.run.TestStructures;
 import picocli.CommandLine;
 
 /** Runs one command line with captured writers. */
@@ -30,8 +30,8 @@ record CommandRun(int code, String out, String err) {
     Session session =
         new Session(
             engine,
-            new TestStructures(),
-            Molecule::smiles,
+            new MoleculeReader(MoleculeNames.builtIn()),
+            MoleculeNames.builtIn(),
             new ByteArrayInputStream(input.getBytes(StandardCharsets.UTF_8)),
             isTerminal,
             () -> clock[0] += 700_000_000L);
