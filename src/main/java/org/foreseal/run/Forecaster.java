@@ -36,6 +36,11 @@ public final class Forecaster implements Engine {
     this.energySource = energySource;
   }
 
+  /** The forecaster with the Gibbs energies of this build. */
+  public static Forecaster standard(Function<Molecule, String> names, String version) {
+    return new Forecaster(names, version, kelvin -> (reactants, products) -> Optional.empty());
+  }
+
   @Override
   public Forecast forecast(RunSheet sheet, ForecastOptions options, Progress progress) {
     RunNetwork run = RunNetwork.grow(sheet, options, energySource, progress);
