@@ -27,13 +27,6 @@ final class RingPerception {
 
   /** The rings, each as atoms in cyclic order, shortest first. */
   static int[][] rings(Skeleton graph) {
-    int bonds = 0;
-    for (int[] row : graph.neighbours) {
-      bonds += row.length;
-    }
-    if (bonds / 2 < graph.size) {
-      return new int[0][];
-    }
     RingPerception perception = new RingPerception(graph);
     perception.findSystems();
     perception.rings.sort(Comparator.comparingInt(r -> r.length));

@@ -20,6 +20,10 @@ import java.util.function.ToDoubleFunction;
 public final class RouteFinder {
   private static final int MOST_EXPANSIONS = 4000;
 
+  /** A step shared by two branches makes a route cheaper than its bound, so a few more are found and sorted. */
+  private static final int SPARE = 4;
+
+
   private final Network network;
   private final double[] stepCost;
   private final double[] cheapest;
@@ -105,7 +109,7 @@ public final class RouteFinder {
     agenda.add(PartialRoute.startingAt(target));
     List<Route> found = new ArrayList<>();
     for (int expansions = 0;
-        expansions < MOST_EXPANSIONS && found.size() < most && !agenda.isEmpty();
+        expansions < MOST_EXPANSIONS && found.size() < most + SPARE && !agenda.isEmpty();
         expansions++) {
       PartialRoute best = agenda.remove();
       if (best.isComplete()) {
@@ -119,7 +123,8 @@ public final class RouteFinder {
         }
       }
     }
-    return found;
+    found.sort(Comparator.comparingDouble(Route::cost));
+    return List.copyOf(found.subList(0, Math.min(most, found.size())));
   }
 
   private static boolean sameSteps(Route a, Route b) {
