@@ -34,22 +34,8 @@ final class GroupMethod {
     if (tabulated.isPresent()) {
       return Estimate.of(tabulated.get());
     }
-    Optional<String> obstacle = obstacle(molecule);
+    Optional<String> obstacle = TypeCheck.obstacle(molecule);
     return obstacle.isPresent() ? Estimate.none(obstacle.get()) : fromGroups(molecule);
-  }
-
-  private static Optional<String> obstacle(Molecule molecule) {
-    for (int i = 0; i < molecule.atomCount(); i++) {
-      if (molecule.charge(i) != 0) {
-        return Optional.of("the gas-phase groups have no charged atoms");
-      }
-    }
-    if (!TypedMolecule.canType(molecule)) {
-      return Optional.of("the gas-phase groups know only C, H, N, O and S");
-    }
-    return molecule.heavyAtomCount() < 2
-        ? Optional.of("no tabulated gas-phase values for this small molecule")
-        : Optional.empty();
   }
 
   private Estimate<Species> fromGroups(Molecule molecule) {

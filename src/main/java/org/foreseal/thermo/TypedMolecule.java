@@ -28,7 +28,7 @@ final class TypedMolecule {
   private final BitSet outerDouble = new BitSet();
   private final AtomType[] types;
 
-  /** Types a molecule of uncharged C, N, O, S; anything else is a programming error. */
+  /** Types a molecule that passed {@link TypeCheck}. */
   TypedMolecule(Molecule graph) {
     this.graph = graph;
     rings = RingFamily.of(graph);
@@ -41,17 +41,6 @@ final class TypedMolecule {
     for (int i = 0; i < types.length; i++) {
       types[i] = typeOf(i);
     }
-  }
-
-  /** Whether every atom is one the group method has types for: uncharged C, N, O or S. */
-  static boolean canType(Molecule m) {
-    for (int i = 0; i < m.atomCount(); i++) {
-      int e = m.element(i);
-      if (m.charge(i) != 0 || (e != CARBON && e != NITROGEN && e != OXYGEN && e != SULFUR)) {
-        return false;
-      }
-    }
-    return true;
   }
 
   private void markDoubleBonds() {
