@@ -20,9 +20,11 @@ import java.util.function.ToDoubleFunction;
 public final class RouteFinder {
   private static final int MOST_EXPANSIONS = 4000;
 
-  /** A step shared by two branches makes a route cheaper than its bound, so a few more are found and sorted. */
+  /**
+   * A step shared by two branches makes a route cheaper than its bound, so a few more are found and
+   * sorted.
+   */
   private static final int SPARE = 4;
-
 
   private final Network network;
   private final double[] stepCost;

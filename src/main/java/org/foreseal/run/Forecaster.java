@@ -38,7 +38,7 @@ public final class Forecaster implements Engine {
 
   /** The forecaster with the Gibbs energies of this build. */
   public static Forecaster standard(Function<Molecule, String> names, String version) {
-    return new Forecaster(names, version, kelvin -> (reactants, products) -> Optional.empty());
+    return new Forecaster(names, version, GasPhaseEnergies::at);
   }
 
   @Override

@@ -27,10 +27,19 @@ class NetworkExpansionTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "OC(=O)Cc1ccccc1", "OC(=O)CCCCC", "OC1CCCCC1", "O=Cc1ccccc1", "NCC(=O)O", "NCc1ccccc1",
-            "CCCCCCO",
-        "OC(=O)CCC(=O)O", "COc1ccccc1O", "CC(=O)CCC(C)=O", "Oc1ccc(cc1)C(C)=O", "CC(N)=O",
-            "CCOC(C)=O"
+        "OC(=O)Cc1ccccc1",
+        "OC(=O)CCCCC",
+        "OC1CCCCC1",
+        "O=Cc1ccccc1",
+        "NCC(=O)O",
+        "NCc1ccccc1",
+        "CCCCCCO",
+        "OC(=O)CCC(=O)O",
+        "COc1ccccc1O",
+        "CC(=O)CCC(C)=O",
+        "Oc1ccc(cc1)C(C)=O",
+        "CC(N)=O",
+        "CCOC(C)=O"
       })
   void everyStepBalancesElementsChargeAndAtoms(String substrate) {
     Network network = Networks.grow(Limits.ofDepth(2), substrate);
