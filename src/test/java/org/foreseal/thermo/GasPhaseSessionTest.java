@@ -126,4 +126,21 @@ class GasPhaseSessionTest {
         session.stepGibbs(reactants, products, KELVIN),
         GasPhase.standard().stepGibbs(reactants, products, KELVIN));
   }
+
+  @Test
+  void givesTheSameFromManyThreads() {
+    List<Molecule> all =
+        TestTables.rows("feature-counts.csv").stream().map(r -> Smiles.read(r.get(0))).toList();
+    List<Estimate<Thermochemistry>> together = all.parallelStream().map(session::of).toList();
+    GasPhaseSession alone = GasPhase.standard().session();
+    assertEquals(all.stream().map(alone::of).toList(), together);
+  }
+
+  @Test
+  void anEstimateCarriesItsReasonThroughAChange() {
+    Estimate<Integer> none = Estimate.<String>none("too small").map(String::length);
+    assertEquals("too small", none.reason().orElseThrow());
+    assertTrue(none.value().isEmpty());
+    assertEquals(3, Estimate.of("abc").map(String::length).value().orElseThrow());
+  }
 }
