@@ -198,14 +198,14 @@ final class OptionReader {
   }
 
   /**
-   * A double bond of a SMILES is no amount: {@code C=O} has no number behind it, and {@code
-   * C=1CCCCC1} is a ring closure, after which letters of atoms follow.
+   * A double bond of a SMILES is no amount: {@code C=O} has no number behind it, and in {@code
+   * C=1CCCCC1} an atom follows the number of the ring closure where a unit would stand.
    */
   private static Parts parts(String text) {
     int at = text.lastIndexOf('=');
     String behind = at < 0 ? "" : text.substring(at + 1).strip();
     boolean isAmount = !behind.isEmpty() && "+-.0123456789".indexOf(behind.charAt(0)) >= 0;
-    boolean isRingClosure = behind.matches("\\d[A-Z(\\[].*\\d.*");
+    boolean isRingClosure = behind.matches("\\d[BCNOPSFI(\\[].*");
     return isAmount && !isRingClosure
         ? new Parts(text.substring(0, at).strip(), Optional.of(behind))
         : new Parts(text.strip(), Optional.empty());
