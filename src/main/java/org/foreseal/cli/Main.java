@@ -4,7 +4,7 @@ import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import org.foreseal.molecule.MoleculeNames;
 import org.foreseal.molecule.MoleculeReader;
-import org.foreseal.run.Engine;
+import org.foreseal.run.Forecaster;
 import picocli.CommandLine;
 
 /** Starts the command line. */
@@ -22,11 +22,12 @@ public final class Main {
   private static Session session() {
     MoleculeNames names = MoleculeNames.builtIn();
     return new Session(
-        Main::engine, new MoleculeReader(names), names, System.in, isTerminal(), System::nanoTime);
-  }
-
-  private static Engine engine() {
-    throw new UnsupportedOperationException("the forecast engine is not part of this build");
+        () -> Forecaster.standard(names::display, Version.text()),
+        new MoleculeReader(names),
+        names,
+        System.in,
+        isTerminal(),
+        System::nanoTime);
   }
 
   /** Up to Java 21 there is a console only when a person sits at the terminal. */

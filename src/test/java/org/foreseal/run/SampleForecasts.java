@@ -3,6 +3,7 @@ package org.foreseal.run;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.foreseal.chromatography.WhereFound;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.Smiles;
 import org.foreseal.quantity.Uncertain;
