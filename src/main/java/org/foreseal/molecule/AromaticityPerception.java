@@ -1,11 +1,13 @@
 package org.foreseal.molecule;
 
+import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Set;
 
 /**
- * Marks aromatic atoms and bonds: a ring (or the rim of two fused rings, as in azulene) in which
- * every atom offers a p orbital and the electrons number 4n + 2.
+ * Marks aromatic atoms and bonds: a ring of five to seven atoms (or the rim of two fused ones, as
+ * in azulene) in which every atom offers a p orbital and the electrons number 4n + 2.
  *
  * <p>An atom with a double bond in any ring gives one electron, a carbon doubly bonded to O, N or S
  * outside the rings gives none, and a neutral singly bonded N, O or S gives its lone pair. A carbon
@@ -15,48 +17,43 @@ import java.util.Set;
  */
 final class AromaticityPerception {
   private static final int NONE = -1;
-  private static final int SMALLEST_RING = 5;
 
   private final Skeleton graph;
-  private final Set<Long> ringBonds = new HashSet<>();
+  private final int[][] ringNeighbours;
   private final int[] electrons;
 
   private AromaticityPerception(Skeleton graph) {
     this.graph = graph;
-    for (int[] ring : graph.rings) {
-      for (int k = 0; k < ring.length; k++) {
-        ringBonds.add(bond(ring[k], ring[(k + 1) % ring.length]));
-      }
-    }
+    ringNeighbours = RingBonds.of(graph);
     electrons = new int[graph.size];
     for (int i = 0; i < graph.size; i++) {
-      electrons[i] = electronsOf(i);
+      electrons[i] = ringNeighbours[i].length == 0 ? NONE : electronsOf(i);
     }
   }
 
   static void mark(Skeleton graph) {
-    if (graph.rings.length > 0) {
+    if (graph.hasRings()) {
       new AromaticityPerception(graph).run();
     }
   }
 
-  private long bond(int a, int b) {
-    return (long) Math.min(a, b) * graph.size + Math.max(a, b);
-  }
-
   private void run() {
-    boolean[] done = new boolean[graph.rings.length];
-    for (int r = 0; r < graph.rings.length; r++) {
-      done[r] = isHueckel(sum(graph.rings[r]));
-      if (done[r]) {
-        markRing(graph.rings[r]);
+    boolean[] allowed = new boolean[graph.size];
+    for (int i = 0; i < graph.size; i++) {
+      allowed[i] = electrons[i] != NONE;
+    }
+    List<int[]> rings = PlanarRings.of(ringNeighbours, allowed);
+    List<int[]> others = new ArrayList<>();
+    for (int[] ring : rings) {
+      if (isHueckel(sum(ring))) {
+        markRing(ring);
+      } else {
+        others.add(ring);
       }
     }
-    for (int r = 0; r < done.length; r++) {
-      for (int q = r + 1; q < done.length; q++) {
-        if (!done[r] && !done[q]) {
-          markFusedRim(graph.rings[r], graph.rings[q]);
-        }
+    for (int r = 0; r < others.size(); r++) {
+      for (int q = r + 1; q < others.size(); q++) {
+        markFusedRim(others.get(r), others.get(q));
       }
     }
   }
@@ -68,9 +65,6 @@ final class AromaticityPerception {
   private int sum(int[] atoms) {
     int total = 0;
     for (int atom : atoms) {
-      if (electrons[atom] == NONE || atoms.length < SMALLEST_RING) {
-        return NONE;
-      }
       total += electrons[atom];
     }
     return total;
@@ -114,6 +108,15 @@ final class AromaticityPerception {
     }
   }
 
+  private boolean isRingBond(int atom, int other) {
+    for (int next : ringNeighbours[atom]) {
+      if (next == other) {
+        return true;
+      }
+    }
+    return false;
+  }
+
   private int electronsOf(int atom) {
     int ringDouble = 0;
     int outer = 0;
@@ -123,7 +126,7 @@ final class AromaticityPerception {
         return NONE;
       }
       if (graph.orders[atom][k] == 2) {
-        if (ringBonds.contains(bond(atom, other))) {
+        if (isRingBond(atom, other)) {
           ringDouble++;
         } else {
           outer = graph.element[other];

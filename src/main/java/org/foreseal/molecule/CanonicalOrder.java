@@ -15,6 +15,7 @@ final class CanonicalOrder {
   private final List<int[]> symmetries = new ArrayList<>();
   private int[] bestRank = new int[0];
   private int[] bestCode = new int[0];
+  private int distinct;
 
   private CanonicalOrder(Skeleton graph) {
     this.graph = graph;
@@ -32,7 +33,7 @@ final class CanonicalOrder {
               | (long) graph.neighbours[i].length << 8
               | (graph.aromatic[i] ? 1 : 0);
     }
-    order.search(order.refine(classes(value)), new ArrayList<>());
+    order.search(order.refine(order.classes(value)), new ArrayList<>());
     return order.bestRank;
   }
 
@@ -42,46 +43,59 @@ final class CanonicalOrder {
   }
 
   /** Class of an atom = number of atoms with a smaller value. */
-  private static int[] classes(long[] value) {
+  private int[] classes(long[] value) {
     long[] sorted = value.clone();
     Arrays.sort(sorted);
+    distinct = 0;
+    long[] first = new long[value.length];
+    int[] start = new int[value.length];
+    for (int i = 0; i < sorted.length; i++) {
+      if (i == 0 || sorted[i] != sorted[i - 1]) {
+        first[distinct] = sorted[i];
+        start[distinct++] = i;
+      }
+    }
     int[] result = new int[value.length];
     for (int i = 0; i < value.length; i++) {
-      int at = Arrays.binarySearch(sorted, value[i]);
-      while (at > 0 && sorted[at - 1] == value[i]) {
-        at--;
-      }
-      result[i] = at;
+      result[i] = start[Arrays.binarySearch(first, 0, distinct, value[i])];
     }
     return result;
   }
 
-  private static int distinct(int[] colour) {
-    return (int) Arrays.stream(colour).distinct().count();
-  }
-
-  private int[] refine(int[] start) {
-    int[] colour = start;
-    int count = distinct(colour);
+  private int[] refine(int[] begin) {
+    int[] colour = begin;
+    int count = distinct(begin);
     while (count < graph.size) {
-      long[] value = new long[graph.size];
-      for (int i = 0; i < graph.size; i++) {
-        long sum = 0;
-        for (int k = 0; k < graph.neighbours[i].length; k++) {
-          sum +=
-              mix((colour[graph.neighbours[i][k]] + 1L) * 1048583L + graph.bondCode(i, k) * 7919L);
-        }
-        value[i] = ((long) colour[i] << 48) | (mix(sum) >>> 16);
-      }
-      int[] next = classes(value);
-      int refined = distinct(next);
-      if (refined == count) {
+      int[] next = classes(neighbourhoods(colour));
+      if (distinct == count) {
         return next;
       }
       colour = next;
-      count = refined;
+      count = distinct;
     }
     return colour;
+  }
+
+  private long[] neighbourhoods(int[] colour) {
+    long[] value = new long[graph.size];
+    for (int i = 0; i < graph.size; i++) {
+      long sum = 0;
+      for (int k = 0; k < graph.neighbours[i].length; k++) {
+        sum += mix((colour[graph.neighbours[i][k]] + 1L) * 1048583L + graph.bondCode(i, k) * 7919L);
+      }
+      value[i] = ((long) colour[i] << 48) | (mix(sum) >>> 16);
+    }
+    return value;
+  }
+
+  private static int distinct(int[] colour) {
+    long[] seen = new long[colour.length / 64 + 1];
+    int count = 0;
+    for (int c : colour) {
+      count += (seen[c >> 6] >> c & 1) == 0 ? 1 : 0;
+      seen[c >> 6] |= 1L << c;
+    }
+    return count;
   }
 
   private void search(int[] colour, List<Integer> fixed) {

@@ -1,7 +1,5 @@
 package org.foreseal.molecule;
 
-import java.util.Arrays;
-
 /**
  * Writes the canonical graph as a short string: element, charge, hydrogens and aromaticity of every
  * atom in canonical order, then the bonds of each atom to lower positions. The graph can be read
@@ -10,31 +8,24 @@ import java.util.Arrays;
 final class IdentityKey {
   private IdentityKey() {}
 
-  static String of(Skeleton s, int[] rank) {
-    int[] atomAt = new int[s.size];
-    for (int i = 0; i < s.size; i++) {
-      atomAt[rank[i]] = i;
-    }
-    StringBuilder key = new StringBuilder(s.size * 4);
-    for (int atom : atomAt) {
-      key.append((char) s.element[atom]);
+  static String of(Skeleton canonical) {
+    StringBuilder key = new StringBuilder(canonical.size * 4);
+    for (int i = 0; i < canonical.size; i++) {
+      key.append((char) canonical.element[i]);
       key.append(
-          (char) ((s.charge[atom] + 8) << 4 | s.hydrogens[atom] << 1 | (s.aromatic[atom] ? 1 : 0)));
+          (char)
+              ((canonical.charge[i] + 8) << 4
+                  | canonical.hydrogens[i] << 1
+                  | (canonical.aromatic[i] ? 1 : 0)));
     }
-    for (int q = 1; q < s.size; q++) {
-      int atom = atomAt[q];
-      int[] lower = new int[s.neighbours[atom].length];
-      int count = 0;
-      for (int k = 0; k < lower.length; k++) {
-        int other = rank[s.neighbours[atom][k]];
-        if (other < q) {
-          lower[count++] = other << 3 | s.bondCode(atom, k);
-        }
+    for (int i = 1; i < canonical.size; i++) {
+      int lower = 0;
+      while (lower < canonical.neighbours[i].length && canonical.neighbours[i][lower] < i) {
+        lower++;
       }
-      Arrays.sort(lower, 0, count);
-      key.append((char) count);
-      for (int k = 0; k < count; k++) {
-        key.append((char) lower[k]);
+      key.append((char) lower);
+      for (int k = 0; k < lower; k++) {
+        key.append((char) (canonical.neighbours[i][k] << 3 | canonical.bondCode(i, k)));
       }
     }
     return key.toString();

@@ -23,49 +23,34 @@ public final class Molecule implements Comparable<Molecule> {
   private final boolean[][] ringBond;
   private final String key;
 
-  /** Copies a prepared skeleton into the order given by {@code rank}. */
-  Molecule(Skeleton from, int[] rank, int[][] canonicalOrders, String key) {
+  /** Takes over a prepared skeleton whose atoms are in canonical order. */
+  Molecule(Skeleton from, String key) {
     int n = from.size;
-    element = new byte[n];
-    charge = new byte[n];
-    hydrogens = new byte[n];
-    neighbours = new int[n][];
+    element = bytes(from.element);
+    charge = bytes(from.charge);
+    hydrogens = bytes(from.hydrogens);
+    neighbours = from.neighbours;
     orders = new byte[n][];
-    aromatic = new boolean[n];
-    aromaticBond = new boolean[n][];
+    aromatic = from.aromatic;
+    aromaticBond = from.aromaticBond;
     ringBond = new boolean[n][];
     for (int i = 0; i < n; i++) {
-      int to = rank[i];
-      element[to] = (byte) from.element[i];
-      charge[to] = (byte) from.charge[i];
-      hydrogens[to] = (byte) from.hydrogens[i];
-      aromatic[to] = from.aromatic[i];
-      copyBonds(from, rank, i, canonicalOrders[i]);
+      orders[i] = bytes(from.orders[i]);
+      ringBond[i] = new boolean[neighbours[i].length];
     }
-    rings = new int[from.rings.length][];
-    for (int r = 0; r < rings.length; r++) {
-      rings[r] = Arrays.stream(from.rings[r]).map(i -> rank[i]).toArray();
-      markRingBonds(rings[r]);
+    rings = from.rings;
+    for (int[] ring : rings) {
+      markRingBonds(ring);
     }
     this.key = key;
   }
 
-  private void copyBonds(Skeleton from, int[] rank, int i, int[] order) {
-    int degree = from.neighbours[i].length;
-    Integer[] slots = new Integer[degree];
-    Arrays.setAll(slots, k -> k);
-    Arrays.sort(
-        slots, (a, b) -> Integer.compare(rank[from.neighbours[i][a]], rank[from.neighbours[i][b]]));
-    int to = rank[i];
-    neighbours[to] = new int[degree];
-    orders[to] = new byte[degree];
-    aromaticBond[to] = new boolean[degree];
-    ringBond[to] = new boolean[degree];
-    for (int k = 0; k < degree; k++) {
-      neighbours[to][k] = rank[from.neighbours[i][slots[k]]];
-      orders[to][k] = (byte) order[slots[k]];
-      aromaticBond[to][k] = from.aromaticBond[i][slots[k]];
+  private static byte[] bytes(int[] values) {
+    byte[] result = new byte[values.length];
+    for (int i = 0; i < values.length; i++) {
+      result[i] = (byte) values[i];
     }
+    return result;
   }
 
   private void markRingBonds(int[] ring) {

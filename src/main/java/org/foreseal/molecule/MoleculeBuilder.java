@@ -228,62 +228,17 @@ public final class MoleculeBuilder {
 
   private static Fragment prepare(Skeleton s, int[] atoms) throws ImpossibleStructureException {
     s.checkValences();
-    s.rings = RingPerception.rings(s);
     AromaticityPerception.mark(s);
     int[] rank = CanonicalOrder.ranks(s);
     int[] builderAtoms = new int[atoms.length];
     for (int i = 0; i < atoms.length; i++) {
       builderAtoms[rank[i]] = atoms[i];
     }
-    Molecule molecule = new Molecule(s, rank, canonicalOrders(s, rank), IdentityKey.of(s, rank));
-    return new Fragment(molecule, builderAtoms);
-  }
-
-  /** Bond orders per skeleton atom, the aromatic ones localised anew in canonical order. */
-  private static int[][] canonicalOrders(Skeleton s, int[] rank)
-      throws ImpossibleStructureException {
-    if (s.rings.length == 0) {
-      return s.orders;
+    Skeleton canonical = s.inOrder(rank);
+    if (canonical.hasRings()) {
+      canonical.localiseAnew();
+      canonical.rings = RingPerception.rings(canonical);
     }
-    int n = s.size;
-    int[] e = new int[n];
-    int[] q = new int[n];
-    int[] h = new int[n];
-    int[][] nb = new int[n][];
-    int[][] od = new int[n][];
-    for (int i = 0; i < n; i++) {
-      int to = rank[i];
-      e[to] = s.element[i];
-      q[to] = s.charge[i];
-      h[to] = s.hydrogens[i];
-      int[][] sorted = sortedBonds(s, rank, i);
-      nb[to] = sorted[0];
-      od[to] = sorted[1];
-    }
-    Kekulization.localise(e, q, h, nb, od);
-    int[][] back = new int[n][];
-    for (int i = 0; i < n; i++) {
-      int to = rank[i];
-      back[i] = new int[s.neighbours[i].length];
-      for (int k = 0; k < back[i].length; k++) {
-        back[i][k] = od[to][Arrays.binarySearch(nb[to], rank[s.neighbours[i][k]])];
-      }
-    }
-    return back;
-  }
-
-  private static int[][] sortedBonds(Skeleton s, int[] rank, int atom) {
-    int d = s.neighbours[atom].length;
-    long[] packed = new long[d];
-    for (int k = 0; k < d; k++) {
-      packed[k] = (long) rank[s.neighbours[atom][k]] << 4 | s.bondCode(atom, k);
-    }
-    Arrays.sort(packed);
-    int[][] result = new int[2][d];
-    for (int k = 0; k < d; k++) {
-      result[0][k] = (int) (packed[k] >> 4);
-      result[1][k] = (int) (packed[k] & 15);
-    }
-    return result;
+    return new Fragment(new Molecule(canonical, IdentityKey.of(canonical)), builderAtoms);
   }
 }

@@ -9,61 +9,88 @@ import java.util.List;
 import java.util.Map;
 
 /**
- * A smallest set of smallest rings. Candidate rings are the shortest paths from every ring atom
- * closed by one bond (Horton's family, SIAM J. Comput. 1987, 16, 358, from memory); the shortest
- * independent ones over the bonds are kept. In cage rings the choice among equally short rings is
- * arbitrary, as it is for every such set.
+ * A smallest set of smallest rings. Bonds that lie in no ring are taken out first; what remains
+ * falls into ring systems. A system with as many bonds as atoms is one ring. In the others
+ * candidate rings are the shortest paths from every atom closed by one bond (Horton's family, SIAM
+ * J. Comput. 1987, 16, 358, from memory) and the shortest independent ones over the bonds are kept.
+ * In cages the choice among equally short rings is arbitrary, as it is for every such set.
  */
 final class RingPerception {
   private final Skeleton graph;
-  private final boolean[] inCycle;
-  private final Map<Long, Integer> bondIndex = new HashMap<>();
+  private final int[][] ringNeighbours;
+  private final List<int[]> rings = new ArrayList<>();
 
   private RingPerception(Skeleton graph) {
     this.graph = graph;
-    this.inCycle = stripBranches(graph);
+    this.ringNeighbours = RingBonds.of(graph);
   }
 
   /** The rings, each as atoms in cyclic order, shortest first. */
   static int[][] rings(Skeleton graph) {
-    int bonds = Arrays.stream(graph.neighbours).mapToInt(n -> n.length).sum() / 2;
-    int wanted = bonds - graph.size + 1;
-    return wanted <= 0 ? new int[0][] : new RingPerception(graph).smallestSet(wanted);
+    RingPerception perception = new RingPerception(graph);
+    perception.findSystems();
+    perception.rings.sort(Comparator.comparingInt(r -> r.length));
+    return perception.rings.toArray(new int[0][]);
   }
 
-  private static boolean[] stripBranches(Skeleton g) {
-    int[] degree = new int[g.size];
-    boolean[] kept = new boolean[g.size];
-    Arrays.fill(kept, true);
-    List<Integer> leaves = new ArrayList<>();
-    for (int i = 0; i < g.size; i++) {
-      degree[i] = g.neighbours[i].length;
-      if (degree[i] <= 1) {
-        leaves.add(i);
-      }
-    }
-    for (int next = 0; next < leaves.size(); next++) {
-      int leaf = leaves.get(next);
-      kept[leaf] = false;
-      for (int other : g.neighbours[leaf]) {
-        if (--degree[other] == 1) {
-          leaves.add(other);
+  private void findSystems() {
+    boolean[] seen = new boolean[graph.size];
+    for (int start = 0; start < graph.size; start++) {
+      if (!seen[start] && ringNeighbours[start].length > 0) {
+        int[] system = system(start, seen);
+        int bonds = 0;
+        for (int atom : system) {
+          bonds += ringNeighbours[atom].length;
+        }
+        int wanted = bonds / 2 - system.length + 1;
+        if (wanted == 1) {
+          rings.add(walk(start, system.length));
+        } else {
+          addSmallestSet(system, wanted);
         }
       }
     }
-    return kept;
   }
 
-  private int[][] smallestSet(int wanted) {
-    List<int[]> candidates = candidates();
-    candidates.sort(Comparator.comparingInt(r -> r.length));
-    List<BitSet> basis = new ArrayList<>();
-    List<int[]> rings = new ArrayList<>();
-    for (int[] ring : candidates) {
-      if (rings.size() == wanted) {
-        break;
+  private int[] system(int start, boolean[] seen) {
+    int[] queue = new int[graph.size];
+    int tail = 0;
+    queue[tail++] = start;
+    seen[start] = true;
+    for (int head = 0; head < tail; head++) {
+      for (int next : ringNeighbours[queue[head]]) {
+        if (!seen[next]) {
+          seen[next] = true;
+          queue[tail++] = next;
+        }
       }
-      BitSet rest = bondSet(ring);
+    }
+    return Arrays.copyOf(queue, tail);
+  }
+
+  private int[] walk(int start, int length) {
+    int[] ring = new int[length];
+    int before = -1;
+    int at = start;
+    for (int i = 0; i < length; i++) {
+      ring[i] = at;
+      int next = ringNeighbours[at][0] == before ? ringNeighbours[at][1] : ringNeighbours[at][0];
+      before = at;
+      at = next;
+    }
+    return ring;
+  }
+
+  private void addSmallestSet(int[] system, int wanted) {
+    List<int[]> candidates = new ArrayList<>();
+    for (int root : system) {
+      addCandidates(root, system, candidates);
+    }
+    candidates.sort(Comparator.comparingInt(r -> r.length));
+    Map<Long, Integer> bondIndex = new HashMap<>();
+    List<BitSet> basis = new ArrayList<>();
+    for (int[] ring : candidates) {
+      BitSet rest = bondSet(ring, bondIndex);
       for (BitSet b : basis) {
         if (rest.get(b.nextSetBit(0))) {
           rest.xor(b);
@@ -73,20 +100,26 @@ final class RingPerception {
         basis.add(rest);
         rings.add(ring);
       }
-    }
-    return rings.toArray(new int[0][]);
-  }
-
-  private List<int[]> candidates() {
-    List<int[]> found = new ArrayList<>();
-    for (int root = 0; root < graph.size; root++) {
-      if (inCycle[root]) {
-        int[] parent = new int[graph.size];
-        int[] distance = breadthFirst(root, parent);
-        addClosures(root, parent, distance, found);
+      if (basis.size() == wanted) {
+        return;
       }
     }
-    return found;
+  }
+
+  private void addCandidates(int root, int[] system, List<int[]> found) {
+    int[] parent = new int[graph.size];
+    int[] distance = breadthFirst(root, parent);
+    for (int a : system) {
+      for (int b : ringNeighbours[a]) {
+        boolean closes = a < b && parent[a] != b && parent[b] != a;
+        if (closes && Math.abs(distance[a] - distance[b]) <= 1) {
+          int[] ring = join(root, a, b, parent, distance);
+          if (ring.length > 2) {
+            found.add(ring);
+          }
+        }
+      }
+    }
   }
 
   private int[] breadthFirst(int root, int[] parent) {
@@ -94,14 +127,13 @@ final class RingPerception {
     Arrays.fill(distance, -1);
     Arrays.fill(parent, -1);
     int[] queue = new int[graph.size];
-    int head = 0;
     int tail = 0;
     queue[tail++] = root;
     distance[root] = 0;
-    while (head < tail) {
-      int at = queue[head++];
-      for (int next : graph.neighbours[at]) {
-        if (inCycle[next] && distance[next] < 0) {
+    for (int head = 0; head < tail; head++) {
+      int at = queue[head];
+      for (int next : ringNeighbours[at]) {
+        if (distance[next] < 0) {
           distance[next] = distance[at] + 1;
           parent[next] = at;
           queue[tail++] = next;
@@ -111,45 +143,30 @@ final class RingPerception {
     return distance;
   }
 
-  private void addClosures(int root, int[] parent, int[] distance, List<int[]> found) {
-    for (int a = 0; a < graph.size; a++) {
-      for (int b : graph.neighbours[a]) {
-        boolean closes =
-            a < b && distance[a] >= 0 && distance[b] >= 0 && parent[a] != b && parent[b] != a;
-        if (closes && Math.abs(distance[a] - distance[b]) <= 1) {
-          int[] ring = join(root, a, b, parent, distance);
-          if (ring.length > 0) {
-            found.add(ring);
-          }
-        }
-      }
-    }
-  }
-
   /**
-   * The ring root..a-b..root, or an empty array when the two paths share an atom besides the root.
+   * The ring that reads a .. root .. b, or an empty array when the two paths share an atom besides
+   * the root.
    */
   private static int[] join(int root, int a, int b, int[] parent, int[] distance) {
     int[] ring = new int[distance[a] + distance[b] + 1];
     int left = 0;
-    BitSet seen = new BitSet();
+    long[] seen = new long[parent.length / 64 + 1];
     for (int at = a; at != root; at = parent[at]) {
       ring[left++] = at;
-      seen.set(at);
+      seen[at >> 6] |= 1L << at;
     }
     ring[left] = root;
     int right = ring.length;
     for (int at = b; at != root; at = parent[at]) {
-      if (seen.get(at)) {
+      if ((seen[at >> 6] >> at & 1) == 1) {
         return new int[0];
       }
       ring[--right] = at;
     }
-    // The ring reads a .. root .. b; the bond b-a closes it.
-    return ring.length < 3 ? new int[0] : ring;
+    return ring;
   }
 
-  private BitSet bondSet(int[] ring) {
+  private BitSet bondSet(int[] ring, Map<Long, Integer> bondIndex) {
     BitSet set = new BitSet();
     for (int k = 0; k < ring.length; k++) {
       int a = ring[k];

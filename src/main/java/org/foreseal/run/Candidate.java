@@ -1,6 +1,7 @@
 package org.foreseal.run;
 
 import java.util.List;
+import org.foreseal.chromatography.WhereFound;
 import org.foreseal.molecule.Molecule;
 
 /**

@@ -1,4 +1,4 @@
-package org.foreseal.run;
+package org.foreseal.chromatography;
 
 import java.util.Locale;
 

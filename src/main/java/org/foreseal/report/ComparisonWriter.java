@@ -1,0 +1,199 @@
+package org.foreseal.report;
+
+import com.fasterxml.jackson.databind.node.ArrayNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.Set;
+import org.foreseal.report.TextTable.Column;
+import org.foreseal.run.Comparison;
+import org.foreseal.run.Comparison.Difference;
+import org.foreseal.run.Comparison.Missing;
+import org.foreseal.run.Comparison.Product;
+import org.foreseal.run.Comparison.Run;
+import org.foreseal.run.Forecast;
+import org.foreseal.run.RunSheet;
+
+/** Runs side by side, for people, spreadsheets and programs. */
+public final class ComparisonWriter {
+  private static final int WIDTH = TextTable.WIDTH;
+  private static final int ROOM_FOR_LABELS = 40;
+  private static final int USUAL_DIFFERENCES = 12;
+  private static final String ABSENT = "-";
+
+  private ComparisonWriter() {}
+
+  /**
+   * For people.
+   *
+   * @param rows most products listed; {@link Integer#MAX_VALUE} lifts all limits
+   */
+  public static String text(Comparison comparison, int rows) {
+    StringBuilder text = new StringBuilder();
+    RunSheet first = comparison.runs().get(0).forecast().sheet();
+    String substrates =
+        String.join(" + ", first.substrates().stream().map(RunWords::substrate).toList());
+    text.append(Wrap.paragraph("Side by side: ", substrates, WIDTH));
+    if (!first.title().isEmpty()) {
+      text.append(Wrap.paragraph("  ", first.title(), WIDTH));
+    }
+    text.append('\n');
+    List<String> headings = headings(comparison);
+    for (int i = 0; i < headings.size(); i++) {
+      run(headings.get(i), comparison.runs().get(i), text);
+    }
+    text.append(Wrap.paragraph("  caution  ", RunWords.SEALED_VESSEL, WIDTH)).append('\n');
+    table(comparison, headings, rows, text);
+    differences(comparison, rows, text);
+    notes(comparison, text);
+    return text.toString();
+  }
+
+  /** The labels themselves where they fit, else numbers that stand for them. */
+  private static List<String> headings(Comparison comparison) {
+    List<String> labels = comparison.runs().stream().map(Run::label).toList();
+    int needed = labels.stream().mapToInt(l -> l.length() + 2).sum();
+    if (needed <= ROOM_FOR_LABELS) {
+      return labels;
+    }
+    List<String> numbered = new ArrayList<>();
+    for (int i = 0; i < labels.size(); i++) {
+      numbered.add("(" + (i + 1) + ")");
+    }
+    return numbered;
+  }
+
+  private static void run(String heading, Run run, StringBuilder text) {
+    RunSheet sheet = run.forecast().sheet();
+    List<String> parts = new ArrayList<>();
+    parts.add(
+        sheet.solids().isEmpty()
+            ? "no solid"
+            : String.join(" + ", sheet.solids().stream().map(RunWords::solid).toList()));
+    parts.add(RunWords.conditions(sheet));
+    text.append(Wrap.paragraph("  " + heading + "  ", "    ", String.join("; ", parts), WIDTH));
+  }
+
+  private static void table(
+      Comparison comparison, List<String> headings, int rows, StringBuilder text) {
+    List<Column> columns = new ArrayList<>();
+    columns.add(Column.text("product", 16));
+    columns.add(Column.text("formula", 7));
+    columns.add(Column.word("GC"));
+    headings.forEach(h -> columns.add(Column.number(h)));
+    TextTable table = new TextTable("", columns);
+    List<Product> products = comparison.products();
+    for (Product product : products.subList(0, Math.min(rows, products.size()))) {
+      List<String> cells = new ArrayList<>();
+      cells.add(product.name());
+      cells.add(product.molecule().formula().toString());
+      cells.add(product.gcVisible() ? "yes" : "no");
+      product.scores().forEach(s -> cells.add(score(s)));
+      table.row(cells);
+    }
+    text.append("Score of each product, ").append(ABSENT).append(" where it is not listed\n");
+    text.append(table);
+    if (products.size() > rows) {
+      text.append("  ... and " + (products.size() - rows) + " more; --all lists them\n");
+    }
+  }
+
+  private static String score(OptionalDouble score) {
+    return score.isPresent() ? Figures.score(score.getAsDouble()) : ABSENT;
+  }
+
+  private static void differences(Comparison comparison, int rows, StringBuilder text) {
+    List<Difference> differences = comparison.differences();
+    text.append("\nTells the runs apart\n");
+    if (differences.isEmpty()) {
+      text.append("  nothing: the runs show the same products at like scores\n");
+    }
+    int most = rows == Integer.MAX_VALUE ? rows : USUAL_DIFFERENCES;
+    differences.stream().limit(most).forEach(d -> difference(d, text));
+    if (differences.size() > most) {
+      text.append("  ... and " + (differences.size() - most) + " more; --all lists them\n");
+    }
+  }
+
+  private static void difference(Difference difference, StringBuilder text) {
+    List<String> parts = new ArrayList<>();
+    for (Missing missing : difference.missing()) {
+      parts.add("not " + missing.label() + " (" + missing.reason() + ")");
+    }
+    String line =
+        difference.product().name()
+            + ": "
+            + String.join(", ", difference.shownBy())
+            + "; "
+            + String.join("; ", parts);
+    text.append(Wrap.paragraph("  ", "    ", line, WIDTH));
+  }
+
+  private static void notes(Comparison comparison, StringBuilder text) {
+    Set<String> notes = new LinkedHashSet<>();
+    for (Run run : comparison.runs()) {
+      Forecast forecast = run.forecast();
+      notes.addAll(forecast.sheet().notes());
+      notes.addAll(forecast.sheet().outsideUsualRange());
+      notes.addAll(forecast.notes());
+      if (forecast.network().isCut()) {
+        notes.add(run.label() + ": " + RunWords.network(forecast.network()));
+      }
+    }
+    notes.add("score is a ranking aid, not a chance");
+    text.append("\nNotes\n");
+    notes.forEach(n -> text.append(Wrap.paragraph("  - ", "    ", n, WIDTH)));
+  }
+
+  /** For spreadsheets: one line per product and run. */
+  public static String csv(Comparison comparison) {
+    List<String> header = new ArrayList<>(List.of("run"));
+    header.addAll(ForecastCsvWriter.COLUMNS);
+    Csv csv = new Csv(header);
+    for (Run run : comparison.runs()) {
+      run.forecast()
+          .candidates()
+          .forEach(
+              c -> {
+                List<String> cells = new ArrayList<>(List.of(run.label()));
+                cells.addAll(ForecastCsvWriter.cells(c));
+                csv.line(cells);
+              });
+    }
+    return csv.toString();
+  }
+
+  /** For programs: every forecast in full, then the differences. */
+  public static String json(Comparison comparison) {
+    ObjectNode root = Json.object();
+    root.put("schemaVersion", ForecastJsonWriter.SCHEMA_VERSION);
+    ArrayNode runs = root.putArray("runs");
+    for (Run run : comparison.runs()) {
+      ObjectNode node = runs.addObject();
+      node.put("label", run.label());
+      node.setAll(ForecastJsonWriter.tree(run.forecast()));
+    }
+    ArrayNode differences = root.putArray("differences");
+    comparison.differences().forEach(d -> differences.add(difference(comparison, d)));
+    return Json.text(root);
+  }
+
+  private static ObjectNode difference(Comparison comparison, Difference difference) {
+    ObjectNode node = Json.object();
+    node.put("name", difference.product().name());
+    node.put("smiles", difference.product().molecule().smiles());
+    ObjectNode scores = node.putObject("scores");
+    for (int i = 0; i < comparison.runs().size(); i++) {
+      scores.set(
+          comparison.runs().get(i).label(), Json.number(difference.product().scores().get(i)));
+    }
+    node.set("shownBy", Json.texts(difference.shownBy()));
+    ArrayNode missing = node.putArray("missing");
+    for (Missing m : difference.missing()) {
+      missing.addObject().put("label", m.label()).put("reason", m.reason());
+    }
+    return node;
+  }
+}

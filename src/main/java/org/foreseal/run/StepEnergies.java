@@ -1,0 +1,13 @@
+package org.foreseal.run;
+
+import java.util.List;
+import java.util.Optional;
+import org.foreseal.molecule.Molecule;
+import org.foreseal.quantity.Uncertain;
+
+/** Gibbs energies of steps at the temperature of a run. Called from several threads. */
+@FunctionalInterface
+interface StepEnergies {
+  /** Standard Gibbs energy of a balanced step, kJ/mol, or nothing where it cannot be estimated. */
+  Optional<Uncertain> deltaGibbs(List<Molecule> reactants, List<Molecule> products);
+}

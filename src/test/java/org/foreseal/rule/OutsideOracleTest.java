@@ -1,0 +1,143 @@
+package org.foreseal.rule;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.nio.charset.StandardCharsets;
+import java.security.MessageDigest;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.HexFormat;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.stream.Collectors;
+import org.foreseal.molecule.Molecule;
+import org.foreseal.molecule.Outcome;
+import org.foreseal.molecule.Smiles;
+import org.junit.jupiter.api.Test;
+
+/**
+ * Every one-reactant rule on nearly a thousand molecules gives the product sets that an independent
+ * general toolkit gave for the same SMIRKS, frozen in the test resources with the script that made
+ * them. Structures are compared by identity, after the keto normalisation, so the toolkits'
+ * different spelling does not matter.
+ */
+class OutsideOracleTest {
+  private static final String FOLDER = "/oracle/";
+
+  private final RuleLibrary library = RuleLibrary.builtIn();
+
+  @Test
+  void productSetsEqualThoseOfAnIndependentToolkit() throws IOException {
+    Map<String, Set<String>> oracle = oracle();
+    Set<String> explained = new TreeSet<>();
+    for (String[] row : rows("known-differences.csv")) {
+      explained.add(row[0] + " " + row[1]);
+    }
+    List<String> differences = new ArrayList<>();
+    Set<String> explainedAndSeen = new TreeSet<>();
+    int compared = 0;
+    for (String line : lines("molecules.smi")) {
+      String smiles = line.substring(0, line.indexOf(' '));
+      Molecule molecule = Smiles.read(smiles);
+      for (Rule rule : oneReactantRules()) {
+        compared++;
+        String id = smiles + " " + rule.id();
+        Set<String> expected = oracle.getOrDefault(id, Set.of());
+        Set<String> ours = ours(rule, molecule);
+        if (!ours.equals(expected) && !explained.contains(id)) {
+          differences.add(id + "\n    toolkit " + expected + "\n    ours    " + ours);
+        } else if (!ours.equals(expected)) {
+          explainedAndSeen.add(id);
+        }
+      }
+    }
+    assertTrue(compared > 500 * 70, "only " + compared + " pairs compared");
+    assertEquals(List.of(), differences, () -> String.join("\n", differences));
+    assertEquals(explained, explainedAndSeen, "explained differences that no longer exist");
+  }
+
+  @Test
+  void theOracleWasMadeWithTheseRules() throws Exception {
+    Map<String, String> frozen = new HashMap<>();
+    for (String[] row : rows("rules-used.csv")) {
+      frozen.put(row[0], row[1]);
+    }
+    Map<String, String> now = new HashMap<>();
+    for (Rule rule : oneReactantRules()) {
+      byte[] text = rule.transformation().toString().getBytes(StandardCharsets.UTF_8);
+      now.put(
+          rule.id(), HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(text)));
+    }
+    assertEquals(frozen, now, "run make_oracle.py again after changing a one-reactant rule");
+  }
+
+  private List<Rule> oneReactantRules() {
+    return library.rules().stream().filter(r -> r.transformation().reactantCount() == 1).toList();
+  }
+
+  private static Set<String> ours(Rule rule, Molecule molecule) {
+    Set<String> result = new TreeSet<>();
+    for (Outcome outcome : rule.transformation().apply(List.of(molecule))) {
+      addUnlessUnchanged(result, outcome.products(), molecule);
+    }
+    return result;
+  }
+
+  private static void addUnlessUnchanged(
+      Set<String> result, List<Molecule> products, Molecule reactant) {
+    if (!products.equals(List.of(reactant))) {
+      result.add(products.stream().sorted().map(Molecule::smiles).collect(Collectors.joining(".")));
+    }
+  }
+
+  private static Map<String, Set<String>> oracle() throws IOException {
+    Map<String, Set<String>> oracle = new HashMap<>();
+    for (String[] row : rows("one-reactant.csv")) {
+      Set<String> outcomes = new TreeSet<>();
+      for (String outcome : row[2].split("\\|", -1)) {
+        addUnlessUnchanged(
+            outcomes, Smiles.readAll(outcome).stream().sorted().toList(), Smiles.read(row[0]));
+      }
+      oracle.put(row[0] + " " + row[1], outcomes);
+    }
+    return oracle;
+  }
+
+  private static List<String[]> rows(String name) throws IOException {
+    return lines(name).stream().skip(1).map(OutsideOracleTest::cells).toList();
+  }
+
+  /** Cells of a CSV line whose quoted cells hold commas but no quotes. */
+  private static String[] cells(String line) {
+    List<String> cells = new ArrayList<>();
+    boolean quoted = false;
+    StringBuilder cell = new StringBuilder();
+    for (int i = 0; i < line.length(); i++) {
+      char c = line.charAt(i);
+      if (c == '"') {
+        quoted = !quoted;
+      } else if (c == ',' && !quoted) {
+        cells.add(cell.toString());
+        cell.setLength(0);
+      } else {
+        cell.append(c);
+      }
+    }
+    cells.add(cell.toString());
+    return cells.toArray(new String[0]);
+  }
+
+  private static List<String> lines(String name) throws IOException {
+    try (InputStream in = OutsideOracleTest.class.getResourceAsStream(FOLDER + name)) {
+      return new String(in.readAllBytes(), StandardCharsets.UTF_8)
+          .lines()
+          .filter(l -> !l.isBlank())
+          .toList();
+    }
+  }
+}
