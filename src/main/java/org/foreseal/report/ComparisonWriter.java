@@ -3,10 +3,13 @@ package org.foreseal.report;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.function.Function;
 import org.foreseal.report.TextTable.Column;
 import org.foreseal.run.Comparison;
 import org.foreseal.run.Comparison.Difference;
@@ -21,6 +24,7 @@ public final class ComparisonWriter {
   private static final int WIDTH = TextTable.WIDTH;
   private static final int ROOM_FOR_LABELS = 40;
   private static final int USUAL_DIFFERENCES = 12;
+  private static final int MOST_COLUMNS = 8;
   private static final String ABSENT = "-";
 
   private ComparisonWriter() {}
@@ -32,21 +36,10 @@ public final class ComparisonWriter {
    */
   public static String text(Comparison comparison, int rows) {
     StringBuilder text = new StringBuilder();
-    RunSheet first = comparison.runs().get(0).forecast().sheet();
-    String substrates =
-        String.join(" + ", first.substrates().stream().map(RunWords::substrate).toList());
-    text.append(Wrap.paragraph("Side by side: ", substrates, WIDTH));
-    if (!first.title().isEmpty()) {
-      text.append(Wrap.paragraph("  ", first.title(), WIDTH));
-    }
-    text.append('\n');
     List<String> headings = headings(comparison);
-    for (int i = 0; i < headings.size(); i++) {
-      run(headings.get(i), comparison.runs().get(i), text);
-    }
-    text.append(Wrap.paragraph("  caution  ", RunWords.SEALED_VESSEL, WIDTH)).append('\n');
+    head(comparison, headings, text);
     table(comparison, headings, rows, text);
-    differences(comparison, rows, text);
+    differences(comparison, headings, rows, text);
     notes(comparison, text);
     return text.toString();
   }
@@ -65,69 +58,125 @@ public final class ComparisonWriter {
     return numbered;
   }
 
-  private static void run(String heading, Run run, StringBuilder text) {
-    RunSheet sheet = run.forecast().sheet();
+  private static void head(Comparison comparison, List<String> headings, StringBuilder text) {
+    RunSheet first = comparison.runs().get(0).forecast().sheet();
+    String substrates =
+        String.join(" + ", first.substrates().stream().map(RunWords::substrate).toList());
+    text.append(Wrap.paragraph("Side by side: ", substrates, WIDTH));
+    if (!first.title().isEmpty()) {
+      text.append(Wrap.paragraph("  ", first.title(), WIDTH));
+    }
+    text.append('\n');
+    line("temperature", same(comparison, RunWords::temperatures), text);
+    line("solids", same(comparison, RunWords::solids), text);
+    line(
+        "additives",
+        String.join("; ", first.additives().stream().map(RunWords::additive).toList()),
+        text);
+    line("conditions", String.join(", ", RunWords.conditionsButTemperature(first)), text);
+    boolean solidsDiffer = same(comparison, RunWords::solids).isEmpty();
+    for (int i = 0; i < headings.size(); i++) {
+      Run run = comparison.runs().get(i);
+      String solids = solidsDiffer ? RunWords.solids(run.forecast().sheet()) : "";
+      legend(headings.get(i), run.label(), solids, text);
+    }
+    line("caution", RunWords.SEALED_VESSEL, text);
+    text.append('\n');
+  }
+
+  private static String same(Comparison comparison, Function<RunSheet, String> words) {
+    List<String> distinct =
+        comparison.runs().stream().map(r -> words.apply(r.forecast().sheet())).distinct().toList();
+    return distinct.size() == 1 ? distinct.get(0) : "";
+  }
+
+  private static void line(String label, String value, StringBuilder text) {
+    if (!value.isEmpty()) {
+      text.append(Wrap.paragraph("  " + label + " ".repeat(13 - label.length()), value, WIDTH));
+    }
+  }
+
+  /** What a heading stands for, where that is not plain from the heading itself. */
+  private static void legend(String heading, String label, String solids, StringBuilder text) {
     List<String> parts = new ArrayList<>();
-    parts.add(
-        sheet.solids().isEmpty()
-            ? "no solid"
-            : String.join(" + ", sheet.solids().stream().map(RunWords::solid).toList()));
-    parts.add(RunWords.conditions(sheet));
-    text.append(Wrap.paragraph("  " + heading + "  ", "    ", String.join("; ", parts), WIDTH));
+    parts.add(heading.equals(label) ? "" : label);
+    parts.add(label.contains(solids) ? "" : solids);
+    String all = String.join(": ", parts.stream().filter(p -> !p.isEmpty()).toList());
+    if (!all.isEmpty()) {
+      text.append(Wrap.paragraph("  " + heading + "  ", "    ", all, WIDTH));
+    }
   }
 
   private static void table(
       Comparison comparison, List<String> headings, int rows, StringBuilder text) {
+    List<Product> products = comparison.products();
+    List<Product> shown = products.subList(0, Math.min(rows, products.size()));
+    text.append("Score of each product, ").append(ABSENT).append(" where it is not listed\n");
+    for (int from = 0; from < headings.size(); from += MOST_COLUMNS) {
+      text.append(from == 0 ? "" : "\n");
+      text.append(table(shown, headings, from, Math.min(headings.size(), from + MOST_COLUMNS)));
+    }
+    if (products.size() > rows) {
+      text.append("  ... and " + (products.size() - rows) + " more; --all lists them\n");
+    }
+  }
+
+  /** The runs from one index to before another. */
+  private static TextTable table(List<Product> products, List<String> headings, int from, int to) {
     List<Column> columns = new ArrayList<>();
     columns.add(Column.text("product", 16));
     columns.add(Column.text("formula", 7));
     columns.add(Column.word("GC"));
-    headings.forEach(h -> columns.add(Column.number(h)));
+    headings.subList(from, to).forEach(h -> columns.add(Column.number(h)));
     TextTable table = new TextTable("", columns);
-    List<Product> products = comparison.products();
-    for (Product product : products.subList(0, Math.min(rows, products.size()))) {
+    for (Product product : products) {
       List<String> cells = new ArrayList<>();
       cells.add(product.name());
       cells.add(product.molecule().formula().toString());
       cells.add(product.gcVisible() ? "yes" : "no");
-      product.scores().forEach(s -> cells.add(score(s)));
+      product.scores().subList(from, to).forEach(s -> cells.add(score(s)));
       table.row(cells);
     }
-    text.append("Score of each product, ").append(ABSENT).append(" where it is not listed\n");
-    text.append(table);
-    if (products.size() > rows) {
-      text.append("  ... and " + (products.size() - rows) + " more; --all lists them\n");
-    }
+    return table;
   }
 
   private static String score(OptionalDouble score) {
     return score.isPresent() ? Figures.score(score.getAsDouble()) : ABSENT;
   }
 
-  private static void differences(Comparison comparison, int rows, StringBuilder text) {
+  private static void differences(
+      Comparison comparison, List<String> headings, int rows, StringBuilder text) {
     List<Difference> differences = comparison.differences();
     text.append("\nTells the runs apart\n");
     if (differences.isEmpty()) {
       text.append("  nothing: the runs show the same products at like scores\n");
     }
+    Map<String, String> headingOf = new LinkedHashMap<>();
+    for (int i = 0; i < headings.size(); i++) {
+      headingOf.put(comparison.runs().get(i).label(), headings.get(i));
+    }
     int most = rows == Integer.MAX_VALUE ? rows : USUAL_DIFFERENCES;
-    differences.stream().limit(most).forEach(d -> difference(d, text));
+    differences.stream().limit(most).forEach(d -> difference(d, headingOf, text));
     if (differences.size() > most) {
       text.append("  ... and " + (differences.size() - most) + " more; --all lists them\n");
     }
   }
 
-  private static void difference(Difference difference, StringBuilder text) {
-    List<String> parts = new ArrayList<>();
+  private static void difference(
+      Difference difference, Map<String, String> headingOf, StringBuilder text) {
+    Map<String, List<String>> byReason = new LinkedHashMap<>();
     for (Missing missing : difference.missing()) {
-      parts.add("not " + missing.label() + " (" + missing.reason() + ")");
+      byReason
+          .computeIfAbsent(missing.reason(), r -> new ArrayList<>())
+          .add(headingOf.getOrDefault(missing.label(), missing.label()));
     }
-    String line =
-        difference.product().name()
-            + ": "
-            + String.join(", ", difference.shownBy())
-            + "; "
-            + String.join("; ", parts);
+    List<String> parts = new ArrayList<>();
+    List<String> shown =
+        difference.shownBy().stream().map(l -> headingOf.getOrDefault(l, l)).toList();
+    parts.add("with " + String.join(", ", shown));
+    byReason.forEach(
+        (reason, labels) -> parts.add("not with " + String.join(", ", labels) + ": " + reason));
+    String line = difference.product().name() + ": " + String.join("; ", parts);
     text.append(Wrap.paragraph("  ", "    ", line, WIDTH));
   }
 

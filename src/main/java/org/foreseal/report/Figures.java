@@ -6,6 +6,7 @@ import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
 import java.util.Locale;
+import org.foreseal.molecule.Molecule;
 import org.foreseal.quantity.Uncertain;
 
 /** Numbers as the outputs show them, the same everywhere. */
@@ -26,6 +27,16 @@ final class Figures {
 
   private static String whole(double value) {
     return Long.toString(Math.round(value));
+  }
+
+  /** Monoisotopic mass in Da, five decimals. */
+  static String dalton(Molecule molecule) {
+    return String.format(Locale.ROOT, "%.5f", molecule.formula().monoisotopicMassDalton());
+  }
+
+  /** A count with its word: 1 fault, 2 faults. */
+  static String count(int number, String word) {
+    return number + " " + word + (number == 1 ? "" : "s");
   }
 
   /** One decimal, for CSV. */

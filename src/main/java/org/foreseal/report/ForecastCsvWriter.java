@@ -39,7 +39,7 @@ public final class ForecastCsvWriter {
         c.name(),
         c.molecule().smiles(),
         c.molecule().formula().toString(),
-        Figures.json(c.molecule().formula().monoisotopicMassDalton()).asText(),
+        Figures.dalton(c.molecule()),
         Boolean.toString(c.isSubstrate()),
         Figures.json(c.score()).asText(),
         c.whereFound().word(),

@@ -1,7 +1,9 @@
 package org.foreseal.report;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
 import org.foreseal.molecule.InchiKeys;
@@ -17,8 +19,6 @@ import org.foreseal.run.ToolInfo;
 public final class ForecastJsonWriter {
   /** Version of the layout; keys are only ever added under one version. */
   public static final int SCHEMA_VERSION = 1;
-
-  private static final double DALTON_DECIMALS = 1e5;
 
   private ForecastJsonWriter() {}
 
@@ -56,8 +56,7 @@ public final class ForecastJsonWriter {
     node.put("smiles", c.molecule().smiles());
     node.put("formula", c.molecule().formula().toString());
     node.put("inchiKey", InchiKeys.of(c.molecule()).orElse(null));
-    double mass = c.molecule().formula().monoisotopicMassDalton();
-    node.put("monoisotopicMassDa", Math.round(mass * DALTON_DECIMALS) / DALTON_DECIMALS);
+    node.put("monoisotopicMassDa", new BigDecimal(Figures.dalton(c.molecule())));
     node.put("isSubstrate", c.isSubstrate());
     node.put("isOrganic", c.isOrganic());
     node.set("score", Json.number(c.score()));
@@ -107,7 +106,7 @@ public final class ForecastJsonWriter {
     return node;
   }
 
-  private static com.fasterxml.jackson.databind.JsonNode tenths(double value) {
+  private static JsonNode tenths(double value) {
     return Json.number(Math.round(value * 10) / 10.0);
   }
 

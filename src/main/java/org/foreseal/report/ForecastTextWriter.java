@@ -4,9 +4,12 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.foreseal.report.TextTable.Column;
 import org.foreseal.run.Candidate;
 import org.foreseal.run.Forecast;
+import org.foreseal.run.ForecastRoute;
 import org.foreseal.run.RuledOut;
 import org.foreseal.run.RunSheet;
 
@@ -93,14 +96,12 @@ public final class ForecastTextWriter {
             "",
             List.of(
                 Column.number("#"),
-                Column.text("product", 14),
+                Column.text("product", 30),
                 Column.text("formula", 7),
                 Column.number("score"),
                 Column.number("steps"),
-                Column.text("made by", 12),
-                Column.word("dG kJ/mol"),
-                Column.text("needs", 8)));
-    visible.stream().limit(rows).forEach(c -> table.row(cells(c)));
+                Column.number("dG kJ/mol")));
+    visible.stream().limit(rows).forEach(c -> table.row(cells(c), remark(c)));
     text.append(table);
     more(visible.size(), rows, "products");
   }
@@ -112,9 +113,19 @@ public final class ForecastTextWriter {
         c.molecule().formula().toString(),
         Figures.score(c.score()),
         Integer.toString(c.depth()),
-        Candidates.madeBy(c),
-        Candidates.hurdle(c).map(Figures::gibbs).orElse("not known"),
-        c.needs().isEmpty() ? "-" : String.join(", ", c.needs()));
+        Candidates.hurdle(c).map(Figures::gibbs).orElse("not known"));
+  }
+
+  /** What the steps of the best route do, and what they need. */
+  private static String remark(Candidate c) {
+    String route =
+        Candidates.bestRoute(c).stream()
+            .flatMap(r -> r.steps().stream())
+            .map(ForecastRoute.Step::title)
+            .distinct()
+            .collect(Collectors.joining(", then "));
+    String needs = c.needs().isEmpty() ? "" : "needs " + String.join(", ", c.needs());
+    return Stream.of(route, needs).filter(t -> !t.isEmpty()).collect(Collectors.joining("; "));
   }
 
   private void elsewhere() {
@@ -132,7 +143,7 @@ public final class ForecastTextWriter {
                   Column.number("score"),
                   Column.number("steps"),
                   Column.word("where"),
-                  Column.text("made by", 12)));
+                  Column.text("made by", 20)));
       elsewhere.stream()
           .limit(most)
           .forEach(

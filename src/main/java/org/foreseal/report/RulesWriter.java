@@ -16,7 +16,7 @@ public final class RulesWriter {
 
   /** The list for people, by family. */
   public static String listText(List<RuleSummary> rules) {
-    StringBuilder text = new StringBuilder(rules.size() + " rules\n");
+    StringBuilder text = new StringBuilder(Figures.count(rules.size(), "rule") + "\n");
     for (String family : rules.stream().map(RuleSummary::family).distinct().toList()) {
       TextTable table =
           new TextTable(
@@ -42,7 +42,7 @@ public final class RulesWriter {
         new StringBuilder(Wrap.paragraph("", rule.id() + ": " + rule.title(), WIDTH));
     fact("family", rule.family(), text);
     fact("needs", needs(rule), text);
-    fact("window", window(rule) + " C", text);
+    fact("window", rule.window().isPresent() ? window(rule) + " C" : "any", text);
     fact("prominence", Integer.toString(rule.prominence()), text);
     rule.facts().forEach(f -> fact(f.label(), f.text(), text));
     return text.toString();
@@ -122,8 +122,15 @@ public final class RulesWriter {
       String rule = fault.rule().isEmpty() ? "" : fault.rule() + ": ";
       text.append(Wrap.paragraph(fault.place() + ": ", "  ", rule + fault.problem(), WIDTH));
     }
-    text.append(check.rules() + " rules, " + check.examples() + " examples and counter-examples: ");
-    text.append(check.faults().isEmpty() ? "all pass\n" : check.faults().size() + " faults\n");
+    text.append(
+        Figures.count(check.rules(), "rule")
+            + ", "
+            + check.examples()
+            + " examples and counter-examples: ");
+    text.append(
+        check.faults().isEmpty()
+            ? "all pass\n"
+            : Figures.count(check.faults().size(), "fault") + "\n");
     return text.toString();
   }
 

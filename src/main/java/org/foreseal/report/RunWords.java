@@ -43,8 +43,13 @@ final class RunWords {
   }
 
   static String conditions(RunSheet sheet) {
+    List<String> parts = new ArrayList<>(List.of(temperatures(sheet)));
+    parts.addAll(conditionsButTemperature(sheet));
+    return String.join(", ", parts);
+  }
+
+  static List<String> conditionsButTemperature(RunSheet sheet) {
     List<String> parts = new ArrayList<>();
-    parts.add(temperatures(sheet));
     sheet.pressureBar().ifPresent(p -> parts.add(Quantities.plain(p) + " bar"));
     sheet.durationHours().ifPresent(h -> parts.add(Quantities.plain(h) + " h"));
     if (!sheet.inWater()) {
@@ -56,7 +61,7 @@ final class RunWords {
         .ifPresent(p -> parts.add("pH " + Quantities.plain(p) + " (25 C)"));
     sheet.hydrogen().ifPresent(h -> parts.add("hydrogen: " + h.words()));
     sheet.vessel().map(RunSheet.Vessel::kind).filter(k -> !k.isEmpty()).ifPresent(parts::add);
-    return String.join(", ", parts);
+    return parts;
   }
 
   static String substrate(RunSheet.Substrate substrate) {
@@ -70,6 +75,13 @@ final class RunWords {
         .surfaceSquareMetresPerGram()
         .ifPresent(s -> text.append(", ").append(Quantities.plain(s)).append(" m2/g"));
     return text.append(roles(solid.roles())).toString();
+  }
+
+  /** Every solid of a run, or no solid. */
+  static String solids(RunSheet sheet) {
+    return sheet.solids().isEmpty()
+        ? "no solid"
+        : sheet.solids().stream().map(RunWords::solid).collect(Collectors.joining("; "));
   }
 
   static String additive(RunSheet.Additive additive) {

@@ -11,7 +11,7 @@ final class TextTable {
   static final int WIDTH = 80;
 
   private final List<Column> columns;
-  private final List<List<String>> rows = new ArrayList<>();
+  private final List<Row> rows = new ArrayList<>();
   private final String indent;
 
   /**
@@ -35,16 +35,27 @@ final class TextTable {
     }
   }
 
+  /**
+   * A row.
+   *
+   * @param remark stands below the cells, indented; may be empty
+   */
+  private record Row(List<String> cells, String remark) {}
+
   TextTable(String indent, List<Column> columns) {
     this.indent = indent;
     this.columns = List.copyOf(columns);
   }
 
   TextTable row(List<String> cells) {
+    return row(cells, "");
+  }
+
+  TextTable row(List<String> cells, String remark) {
     if (cells.size() != columns.size()) {
       throw new IllegalArgumentException(cells.size() + " cells for " + columns.size());
     }
-    rows.add(List.copyOf(cells));
+    rows.add(new Row(List.copyOf(cells), remark));
     return this;
   }
 
@@ -53,7 +64,13 @@ final class TextTable {
     int[] widths = widths();
     StringBuilder text = new StringBuilder();
     append(text, columns.stream().map(Column::heading).toList(), widths);
-    rows.forEach(row -> append(text, row, widths));
+    String remarkIndent = indent + " ".repeat(widths[0] + 4);
+    for (Row row : rows) {
+      append(text, row.cells(), widths);
+      if (!row.remark().isEmpty()) {
+        text.append(Wrap.paragraph(remarkIndent, row.remark(), WIDTH));
+      }
+    }
     return text.toString();
   }
 
@@ -61,8 +78,8 @@ final class TextTable {
     int[] widths = new int[columns.size()];
     for (int c = 0; c < widths.length; c++) {
       widths[c] = columns.get(c).heading().length();
-      for (List<String> row : rows) {
-        widths[c] = Math.max(widths[c], row.get(c).length());
+      for (Row row : rows) {
+        widths[c] = Math.max(widths[c], row.cells().get(c).length());
       }
     }
     while (total(widths) > WIDTH) {

@@ -151,16 +151,28 @@ final class OptionReader {
     Parts parts = parts(text);
     Named named = named(parts.name(), place);
     Solid known = solids.read(named.name(), named.roles(), place);
-    OptionalDouble mass = OptionalDouble.empty();
-    OptionalDouble surface = OptionalDouble.empty();
+    Place amountPlace = parts.amountPlace(place);
+    List<Double> masses = new ArrayList<>();
+    List<Double> surfaces = new ArrayList<>();
     for (String value : parts.amount().map(a -> a.split(",", -1)).orElse(new String[0])) {
       if (Measures.isSurface(value)) {
-        surface = OptionalDouble.of(Measures.surface(value, parts.amountPlace(place)));
+        surfaces.add(Measures.surface(value, amountPlace));
       } else {
-        mass = OptionalDouble.of(Measures.milligrams(value, parts.amountPlace(place)));
+        masses.add(Measures.milligrams(value, amountPlace));
       }
     }
-    return new Solid(known.name(), known.roles(), mass, surface);
+    return new Solid(
+        known.name(),
+        known.roles(),
+        single(masses, "masses", amountPlace),
+        single(surfaces, "surfaces", amountPlace));
+  }
+
+  private static OptionalDouble single(List<Double> values, String what, Place place) {
+    if (values.size() > 1) {
+      throw new BadInputException(place, "two " + what, "write it like magnetite=50mg,5m2/g");
+    }
+    return values.isEmpty() ? OptionalDouble.empty() : OptionalDouble.of(values.get(0));
   }
 
   private record Named(String name, Set<Provision> roles) {}
@@ -186,14 +198,14 @@ final class OptionReader {
   }
 
   /**
-   * A double bond of a SMILES is no amount: {@code C=O} has no number behind it, and {@code
-   * C=1CCCCC1} is a ring closure, after which letters of atoms follow.
+   * A double bond of a SMILES is no amount: {@code C=O} has no number behind it, and in {@code
+   * C=1CCCCC1} an atom follows the number of the ring closure where a unit would stand.
    */
   private static Parts parts(String text) {
     int at = text.lastIndexOf('=');
     String behind = at < 0 ? "" : text.substring(at + 1).strip();
     boolean isAmount = !behind.isEmpty() && "+-.0123456789".indexOf(behind.charAt(0)) >= 0;
-    boolean isRingClosure = behind.matches("\\d[A-Z(\\[].*\\d.*");
+    boolean isRingClosure = behind.matches("\\d[BCNOPSFI(\\[].*");
     return isAmount && !isRingClosure
         ? new Parts(text.substring(0, at).strip(), Optional.of(behind))
         : new Parts(text.strip(), Optional.empty());

@@ -1,9 +1,12 @@
 package org.foreseal.run;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import org.foreseal.molecule.MoleculeReader;
+import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
 
 /** Makes runs from a run sheet, from options, or from both; options win. */
@@ -63,17 +66,32 @@ public final class RunReader {
     return variants(bySolid);
   }
 
+  private static List<Variant> withoutRepeats(List<Variant> variants) {
+    Set<String> seen = new HashSet<>();
+    for (Variant variant : variants) {
+      if (!seen.add(variant.label())) {
+        throw new BadInputException(
+            Place.onCommandLine("--solid " + variant.label(), 9),
+            "the same run is asked for twice: " + variant.label(),
+            "give each --solid once; A+B puts two solids into one run");
+      }
+    }
+    return variants;
+  }
+
   private static Place start(Sheet sheet) {
     return new Place(sheet.source(), 1, 0, sheet.text().lines().findFirst().orElse(""));
   }
 
   private static List<Variant> variants(List<RunSheet> bySolid) {
+    List<String> names = bySolid.stream().map(s -> solidsLabel(s, false)).toList();
+    boolean isEachNamedOnce = names.stream().distinct().count() == names.size();
     List<Variant> result = new ArrayList<>();
     for (RunSheet sheet : bySolid) {
       for (double celsius : sheet.temperatureCelsius()) {
         List<String> label = new ArrayList<>();
         if (bySolid.size() > 1) {
-          label.add(solidsLabel(sheet));
+          label.add(solidsLabel(sheet, !isEachNamedOnce));
         }
         if (sheet.temperatureCelsius().size() > 1) {
           label.add(Quantities.plain(celsius) + " C");
@@ -81,11 +99,21 @@ public final class RunReader {
         result.add(new Variant(String.join(", ", label), sheet.atCelsius(celsius)));
       }
     }
-    return result;
+    return withoutRepeats(result);
   }
 
-  private static String solidsLabel(RunSheet sheet) {
-    List<String> names = sheet.solids().stream().map(RunSheet.Solid::name).toList();
+  private static String solidsLabel(RunSheet sheet, boolean withAmounts) {
+    List<String> names =
+        sheet.solids().stream().map(s -> s.name() + (withAmounts ? amounts(s) : "")).toList();
     return names.isEmpty() ? "no solid" : String.join(" + ", names);
+  }
+
+  private static String amounts(RunSheet.Solid solid) {
+    StringBuilder text = new StringBuilder();
+    solid.milligrams().ifPresent(m -> text.append(' ').append(Quantities.plain(m)).append(" mg"));
+    solid
+        .surfaceSquareMetresPerGram()
+        .ifPresent(a -> text.append(' ').append(Quantities.plain(a)).append(" m2/g"));
+    return text.toString();
   }
 }
