@@ -3,7 +3,9 @@ package org.foreseal.molecule;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.regex.Pattern;
@@ -17,6 +19,9 @@ final class Substituents {
   private final NameGraph g;
   private final Molecule m;
 
+  /** Parts named before: many equally good chains carry the same ones. */
+  private final Map<Long, Optional<Prefix>> named = new HashMap<>();
+
   Substituents(NameGraph g) {
     this.g = g;
     this.m = g.molecule();
@@ -24,6 +29,16 @@ final class Substituents {
 
   /** The prefix of the part that begins with {@code atom} and hangs on {@code on}. */
   Optional<Prefix> prefix(int atom, int on) {
+    long part = (long) atom * m.atomCount() + on;
+    Optional<Prefix> known = named.get(part);
+    if (known == null) {
+      known = named(atom, on);
+      named.put(part, known);
+    }
+    return known;
+  }
+
+  private Optional<Prefix> named(int atom, int on) {
     int order = g.order(atom, on);
     if (order == 2 && g.is(atom, ChemicalElement.O)) {
       return Optional.of(Prefix.simple("oxo"));
