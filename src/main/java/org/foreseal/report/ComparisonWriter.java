@@ -191,7 +191,6 @@ public final class ComparisonWriter {
         notes.add(run.label() + ": " + RunWords.network(forecast.network()));
       }
     }
-    notes.add("score is a ranking aid, not a chance");
     text.append("\nNotes\n");
     notes.forEach(n -> text.append(Wrap.paragraph("  - ", "    ", n, WIDTH)));
   }

@@ -112,7 +112,7 @@ public final class ForecastTextWriter {
         c.name(),
         c.molecule().formula().toString(),
         Figures.score(c.score()),
-        Integer.toString(c.depth()),
+        Integer.toString(Candidates.steps(c)),
         Candidates.hurdle(c).map(Figures::gibbs).orElse("not known"));
   }
 
@@ -222,8 +222,7 @@ public final class ForecastTextWriter {
     List<String> notes = new ArrayList<>(forecast.sheet().notes());
     notes.addAll(forecast.sheet().outsideUsualRange());
     notes.addAll(forecast.notes());
-    notes.add(
-        "score is a ranking aid, not a chance; dG is that of the most uphill step of the route");
+    notes.add("dG is that of the most uphill step of the route");
     text.append("\nNotes\n");
     notes.stream()
         .distinct()
