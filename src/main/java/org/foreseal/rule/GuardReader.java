@@ -3,6 +3,7 @@ package org.foreseal.rule;
 import java.util.List;
 import java.util.Set;
 import org.foreseal.molecule.Pattern;
+import org.foreseal.yaml.YamlValue;
 
 /** Reads one guard of a rule. */
 final class GuardReader {
@@ -24,7 +25,7 @@ final class GuardReader {
 
   private GuardReader() {}
 
-  static Guard read(YamlNode n, int reactantCount) {
+  static Guard read(YamlValue n, int reactantCount) {
     n.mapOf(KEYS);
     List<String> tests = n.keys().stream().filter(TESTS::contains).toList();
     if (tests.size() != 1) {
@@ -34,7 +35,7 @@ final class GuardReader {
     }
     String reason = n.require("reason").text();
     List<String> stops = RuleReader.texts(n.require("stops"));
-    YamlNode test = n.require(tests.get(0));
+    YamlValue test = n.require(tests.get(0));
     return switch (tests.get(0)) {
       case "holds" -> holds(n, reason, stops, reactantCount);
       case "products-hold" ->
@@ -46,7 +47,7 @@ final class GuardReader {
     };
   }
 
-  private static Guard holds(YamlNode n, String reason, List<String> stops, int reactantCount) {
+  private static Guard holds(YamlValue n, String reason, List<String> stops, int reactantCount) {
     int reactant =
         n.textOr("reactant", "any").equals("any")
             ? -1
@@ -56,11 +57,11 @@ final class GuardReader {
     return new Guard.ReactantHolds(reason, stops, reactant, pattern, atMost, unless(n));
   }
 
-  private static Guard.Unless unless(YamlNode n) {
+  private static Guard.Unless unless(YamlValue n) {
     if (!n.has("unless")) {
       return Guard.Unless.NEVER;
     }
-    YamlNode word = n.require("unless");
+    YamlValue word = n.require("unless");
     return switch (word.text()) {
       case "charged" -> Guard.Unless.CHARGED;
       case "all-charged" -> Guard.Unless.ALL_CHARGED;
@@ -71,7 +72,7 @@ final class GuardReader {
     };
   }
 
-  private static Guard.Partners partners(YamlNode n) {
+  private static Guard.Partners partners(YamlValue n) {
     return switch (n.text()) {
       case "all-charged" -> Guard.Partners.ALL_CHARGED;
       case "one-charged" -> Guard.Partners.ONE_CHARGED;

@@ -12,6 +12,7 @@ import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.Pattern;
 import org.foreseal.molecule.Smiles;
 import org.foreseal.molecule.Transformation;
+import org.foreseal.yaml.YamlValue;
 
 /**
  * Reads one rule file. Refuses, with line and column, what does not parse, does not balance or
@@ -53,10 +54,10 @@ final class RuleReader {
   record Contents(String family, String about, List<Rule> rules, List<SpeciesLimit> limits) {}
 
   static Contents read(String source, String yaml) {
-    YamlNode file = YamlNode.parse(source, yaml).mapOf(FILE_KEYS);
+    YamlValue file = YamlValue.parse(source, yaml).mapOf(FILE_KEYS);
     RuleReader reader = new RuleReader(file.require("family").text());
     Set<String> ids = new HashSet<>();
-    for (YamlNode node : file.itemsOf("rules")) {
+    for (YamlValue node : file.itemsOf("rules")) {
       Rule rule = reader.rule(node.mapOf(RULE_KEYS));
       if (!ids.add(rule.id())) {
         throw node.complaint(
@@ -64,13 +65,13 @@ final class RuleReader {
       }
       reader.rules.add(rule);
     }
-    for (YamlNode node : file.itemsOf("species-limits")) {
+    for (YamlValue node : file.itemsOf("species-limits")) {
       reader.limits.add(limit(node.mapOf(Set.of("id", "reason", "holds", "refuses", "accepts"))));
     }
     return new Contents(reader.family, file.textOr("about", ""), reader.rules, reader.limits);
   }
 
-  private Rule rule(YamlNode n) {
+  private Rule rule(YamlValue n) {
     Transformation transformation = compiled(n.require("smirks"), Transformation::of);
     return new Rule(
         id(n.require("id")),
@@ -83,7 +84,7 @@ final class RuleReader {
         provisions(n.itemsOf("helped-by")),
         window(n),
         n.require("prominence").integer(1, 3),
-        n.get("reverse").map(YamlNode::text),
+        n.get("reverse").map(YamlValue::text),
         n.get("stands-for").map(RuleReader::texts),
         pairing(n),
         n.itemsOf("guards").stream()
@@ -97,7 +98,7 @@ final class RuleReader {
         n.place());
   }
 
-  private static String id(YamlNode n) {
+  private static String id(YamlValue n) {
     String id = n.text();
     if (!id.matches("[a-z0-9]+([-,.'][a-z0-9]+)*")) {
       throw n.complaint(
@@ -106,7 +107,7 @@ final class RuleReader {
     return id;
   }
 
-  static <T> T compiled(YamlNode n, Function<String, T> compiler) {
+  static <T> T compiled(YamlValue n, Function<String, T> compiler) {
     try {
       return compiler.apply(n.text());
     } catch (IllegalArgumentException e) {
@@ -116,17 +117,17 @@ final class RuleReader {
     }
   }
 
-  private static List<Set<Provision>> needs(YamlNode n, String key) {
+  private static List<Set<Provision>> needs(YamlValue n, String key) {
     return n.itemsOf(key).stream().map(alternative -> provisions(alternative.items())).toList();
   }
 
-  private static Set<Provision> provisions(List<YamlNode> words) {
+  private static Set<Provision> provisions(List<YamlValue> words) {
     Set<Provision> result = new TreeSet<>();
     words.forEach(w -> result.add(provision(w)));
     return result;
   }
 
-  static Provision provision(YamlNode n) {
+  static Provision provision(YamlValue n) {
     String word = n.text();
     for (Provision p : Provision.values()) {
       if (p.word().equals(word.toLowerCase(Locale.ROOT))) {
@@ -140,9 +141,9 @@ final class RuleReader {
                 ", ", java.util.Arrays.stream(Provision.values()).map(Provision::word).toList()));
   }
 
-  private static Window window(YamlNode n) {
-    YamlNode range = n.require("window-C");
-    List<YamlNode> ends = range.items();
+  private static Window window(YamlValue n) {
+    YamlValue range = n.require("window-C");
+    List<YamlValue> ends = range.items();
     String kind = n.textOr("window", "soft");
     if (ends.size() != 2 || !Set.of("soft", "hard").contains(kind)) {
       throw range.complaint(
@@ -157,8 +158,8 @@ final class RuleReader {
     return new Window(low, high, kind.equals("hard"));
   }
 
-  private static Rule.Pairing pairing(YamlNode n) {
-    Optional<YamlNode> given = n.get("reactants");
+  private static Rule.Pairing pairing(YamlValue n) {
+    Optional<YamlValue> given = n.get("reactants");
     if (given.isEmpty()) {
       return Rule.Pairing.ANY;
     }
@@ -173,13 +174,13 @@ final class RuleReader {
     };
   }
 
-  private static NearMiss nearMiss(YamlNode n) {
+  private static NearMiss nearMiss(YamlValue n) {
     n.mapOf(Set.of("reason", "smirks", "from", "to"));
     return new NearMiss(
         n.require("reason").text(), compiled(n.require("smirks"), Transformation::of), example(n));
   }
 
-  private static List<Citation> sources(YamlNode n) {
+  private static List<Citation> sources(YamlValue n) {
     List<Citation> sources =
         n.itemsOf("sources").stream()
             .map(s -> s.mapOf(Set.of("key", "says")))
@@ -192,7 +193,7 @@ final class RuleReader {
     return sources;
   }
 
-  private static List<Example> examples(YamlNode n) {
+  private static List<Example> examples(YamlValue n) {
     List<Example> examples =
         n.itemsOf("examples").stream().map(e -> example(e.mapOf(Set.of("from", "to")))).toList();
     if (examples.isEmpty()) {
@@ -202,23 +203,23 @@ final class RuleReader {
     return examples;
   }
 
-  private static Example example(YamlNode n) {
+  private static Example example(YamlValue n) {
     return new Example(texts(n.require("from")), texts(n.require("to")));
   }
 
-  static List<String> texts(YamlNode n) {
-    return n.items().stream().map(YamlNode::text).toList();
+  static List<String> texts(YamlValue n) {
+    return n.items().stream().map(YamlValue::text).toList();
   }
 
-  static Set<Molecule> molecules(YamlNode n) {
+  static Set<Molecule> molecules(YamlValue n) {
     Set<Molecule> result = new HashSet<>();
-    for (YamlNode item : n.items()) {
+    for (YamlValue item : n.items()) {
       result.addAll(Smiles.readAll(item.text(), item.place()));
     }
     return result;
   }
 
-  private static SpeciesLimit limit(YamlNode n) {
+  private static SpeciesLimit limit(YamlValue n) {
     return new SpeciesLimit(
         id(n.require("id")),
         n.require("reason").text(),

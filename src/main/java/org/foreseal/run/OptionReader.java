@@ -19,6 +19,7 @@ import org.foreseal.run.RunSheet.Additive;
 import org.foreseal.run.RunSheet.Amount;
 import org.foreseal.run.RunSheet.Solid;
 import org.foreseal.run.RunSheet.Substrate;
+import org.foreseal.yaml.YamlNode;
 
 /** Puts what the options say into a draft. */
 final class OptionReader {

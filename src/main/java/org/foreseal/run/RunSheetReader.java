@@ -17,6 +17,8 @@ import org.foreseal.run.RunSheet.Additive;
 import org.foreseal.run.RunSheet.Amount;
 import org.foreseal.run.RunSheet.Solid;
 import org.foreseal.run.RunSheet.Substrate;
+import org.foreseal.yaml.YamlNode;
+import org.foreseal.yaml.YamlTree;
 
 /**
  * Reads a run sheet, strictly: what is not understood is refused with its place. The format is

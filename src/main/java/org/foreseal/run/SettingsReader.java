@@ -13,6 +13,7 @@ import org.foreseal.run.RunSheet.Derivatization;
 import org.foreseal.run.RunSheet.Detector;
 import org.foreseal.run.RunSheet.StationaryPhase;
 import org.foreseal.run.RunSheet.Vessel;
+import org.foreseal.yaml.YamlNode;
 
 /** Reads the blocks of a run sheet that are not about what is charged. */
 final class SettingsReader {

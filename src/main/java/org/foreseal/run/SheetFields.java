@@ -8,6 +8,7 @@ import java.util.OptionalLong;
 import java.util.regex.Pattern;
 import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
+import org.foreseal.yaml.YamlNode;
 
 /** Reads the keys of one block of a run sheet and refuses those it does not know. */
 final class SheetFields {

@@ -23,6 +23,8 @@ class ArchitectureTest {
           .consideringOnlyDependenciesInLayers()
           .layer("quantity")
           .definedBy("org.foreseal.quantity..")
+          .layer("yaml")
+          .definedBy("org.foreseal.yaml..")
           .layer("molecule")
           .definedBy("org.foreseal.molecule..")
           .layer("rule")
@@ -55,6 +57,8 @@ class ArchitectureTest {
           .mayOnlyBeAccessedByLayers("plan", "run", "report", "cli")
           .whereLayer("network")
           .mayOnlyBeAccessedByLayers("plan", "run", "report", "cli")
+          .whereLayer("yaml")
+          .mayOnlyBeAccessedByLayers("rule", "run")
           .whereLayer("rule")
           .mayOnlyBeAccessedByLayers("network", "run", "report", "cli");
 

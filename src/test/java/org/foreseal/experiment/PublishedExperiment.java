@@ -15,8 +15,8 @@ import java.util.Set;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.Smiles;
 import org.foreseal.rule.Provision;
-import org.foreseal.rule.YamlNode;
 import org.foreseal.run.RunSheet;
+import org.foreseal.yaml.YamlValue;
 
 /** One published heating experiment of the test resources, and the run sheet it amounts to. */
 record PublishedExperiment(
@@ -37,7 +37,7 @@ record PublishedExperiment(
     try (InputStream in =
         PublishedExperiment.class.getResourceAsStream("/experiments/published.yaml")) {
       String yaml = new String(in.readAllBytes(), StandardCharsets.UTF_8);
-      YamlNode file = YamlNode.parse("published.yaml", yaml);
+      YamlValue file = YamlValue.parse("published.yaml", yaml);
       return file.itemsOf("records").stream().map(PublishedExperiment::read).toList();
     } catch (IOException e) {
       throw new UncheckedIOException(e);
@@ -53,7 +53,7 @@ record PublishedExperiment(
         .toList();
   }
 
-  private static PublishedExperiment read(YamlNode n) {
+  private static PublishedExperiment read(YamlValue n) {
     return new PublishedExperiment(
         n.require("id").text(),
         n.require("class").text(),
@@ -66,11 +66,11 @@ record PublishedExperiment(
             n.itemsOf("absent").stream().map(a -> molecule(a.require("smiles"))).toList()));
   }
 
-  private static Molecule molecule(YamlNode n) {
+  private static Molecule molecule(YamlValue n) {
     return Smiles.read(n.text());
   }
 
-  private static Product product(YamlNode n) {
+  private static Product product(YamlValue n) {
     double weight =
         switch (n.require("level").text()) {
           case "major" -> 1;
@@ -85,7 +85,7 @@ record PublishedExperiment(
         weight);
   }
 
-  private static RunSheet sheet(YamlNode n) {
+  private static RunSheet sheet(YamlValue n) {
     List<RunSheet.Substrate> substrates =
         n.itemsOf("substrates").stream()
             .map(
@@ -121,8 +121,8 @@ record PublishedExperiment(
         temperatures(n));
   }
 
-  private static List<Double> temperatures(YamlNode n) {
-    Optional<YamlNode> given = n.get("temperatureC");
+  private static List<Double> temperatures(YamlValue n) {
+    Optional<YamlValue> given = n.get("temperatureC");
     if (given.isEmpty()) {
       return List.of(UNSTATED_CELSIUS);
     }
@@ -133,13 +133,13 @@ record PublishedExperiment(
     return result;
   }
 
-  private static List<String> texts(YamlNode n) {
-    return n.items().stream().map(YamlNode::text).toList();
+  private static List<String> texts(YamlValue n) {
+    return n.items().stream().map(YamlValue::text).toList();
   }
 
-  private static Set<Provision> roles(YamlNode n) {
+  private static Set<Provision> roles(YamlValue n) {
     Set<Provision> roles = EnumSet.noneOf(Provision.class);
-    for (YamlNode word : n.itemsOf("actsAs")) {
+    for (YamlValue word : n.itemsOf("actsAs")) {
       roles.add(Provision.valueOf(word.text().toUpperCase(Locale.ROOT).replace('-', '_')));
     }
     return roles;

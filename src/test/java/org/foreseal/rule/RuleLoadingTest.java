@@ -14,6 +14,7 @@ import java.util.Random;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.foreseal.quantity.BadInputException;
+import org.foreseal.yaml.YamlValue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -90,7 +91,7 @@ class RuleLoadingTest {
         "- {from: [\"CC(=O)O\"], to: [\"C\", \"O=C=O\"]} -> [] -> 4 -> the rule has no example",
         "family: own -> famly: own -> 1 -> unknown key 'famly'",
         "rules: -> rules: [ -> 3 -> not valid YAML",
-        "about: rules of the reader -> family: twice -> 2 -> stands twice"
+        "about: rules of the reader -> family: twice -> 2 -> given twice"
       })
   void aPlantedFaultIsFoundWithItsLine(String good, String bad, int line, String complaint) {
     String yaml = GOOD.replace(good, bad);
@@ -161,8 +162,8 @@ class RuleLoadingTest {
               .toList(),
           Files.readAllLines(folder.resolve("index.txt")));
     }
-    YamlNode list =
-        YamlNode.parse(
+    YamlValue list =
+        YamlValue.parse(
             "references.yaml", Files.readString(Path.of("src/main/resources/references.yaml")));
     Set<String> keys =
         list.items().stream().map(r -> r.require("key").text()).collect(Collectors.toSet());

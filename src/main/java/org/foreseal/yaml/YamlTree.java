@@ -1,4 +1,4 @@
-package org.foreseal.run;
+package org.foreseal.yaml;
 
 import com.fasterxml.jackson.core.JsonLocation;
 import com.fasterxml.jackson.core.JsonProcessingException;
@@ -18,10 +18,10 @@ import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
 
 /**
- * Reads the plain part of YAML that a run sheet needs, keeping every place: keys, lists and single
- * values. Anchors, aliases, tags, repeated keys and further documents are refused.
+ * Reads the plain part of YAML that run sheets and rule files need, keeping every place: keys,
+ * lists and single values. Anchors, aliases, tags, repeated keys and further documents are refused.
  */
-final class YamlTree {
+public final class YamlTree {
   private static final int DEEPEST = 16;
   private static final String SYNTAX_HINT =
       "indent with spaces, one key: value per line; put SMILES and texts with : or # in quotes";
@@ -41,7 +41,7 @@ final class YamlTree {
    *
    * @param source name of the file, for complaints
    */
-  static YamlNode read(String text, String source) {
+  public static YamlNode read(String text, String source) {
     List<String> lines = text.lines().toList();
     Place start = new Place(source, 1, 0, lines.isEmpty() ? "" : lines.get(0));
     refuseControlCharacters(lines, source);
@@ -49,12 +49,12 @@ final class YamlTree {
       YamlTree tree = new YamlTree(source, lines, parser);
       JsonToken first = parser.nextToken();
       if (first == null) {
-        throw new BadInputException(start, "nothing in this file", "begin with substrates:");
+        throw new BadInputException(start, "nothing in this file", "start from an example file");
       }
       YamlNode root = tree.node(first, 0);
       if (parser.nextToken() != null) {
         throw new BadInputException(
-            tree.here(), "a second document", "one run per file: remove the line ---");
+            tree.here(), "a second document", "one document per file: remove the line ---");
       }
       return root;
     } catch (JsonProcessingException e) {
@@ -84,7 +84,7 @@ final class YamlTree {
   private YamlNode node(JsonToken token, int depth) throws IOException {
     Place place = here();
     if (depth > DEEPEST) {
-      throw new BadInputException(place, "nested too deeply", "a run sheet has three levels");
+      throw new BadInputException(place, "nested too deeply", "check the indentation");
     }
     if (parser.isCurrentAlias() || parser.getObjectId() != null || parser.getTypeId() != null) {
       throw new BadInputException(

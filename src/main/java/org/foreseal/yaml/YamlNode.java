@@ -1,11 +1,11 @@
-package org.foreseal.run;
+package org.foreseal.yaml;
 
 import java.util.List;
 import java.util.Map;
 import org.foreseal.quantity.Place;
 
 /** A value of a YAML text that knows where it stands. */
-sealed interface YamlNode {
+public sealed interface YamlNode {
   /** Where the value begins. */
   Place place();
 
