@@ -10,6 +10,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
+import org.foreseal.quantity.CsvTable;
 
 /**
  * The curated names of {@code names/common-names.csv}. Of several names for one structure the first
@@ -34,7 +35,7 @@ final class CommonNames {
 
   CommonNames() {
     Set<String> structures = new HashSet<>();
-    for (List<String> row : CsvTable.read(TABLE)) {
+    for (List<String> row : CsvTable.read(TABLE).rows()) {
       Entry entry = new Entry(row.get(0), row.get(1), row.get(2));
       byName.putIfAbsent(normalised(entry.name()), entry);
       if (structures.add(entry.smiles())) {

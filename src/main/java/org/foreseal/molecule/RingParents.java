@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.TreeSet;
+import org.foreseal.quantity.CsvTable;
 
 /**
  * The ring parents of {@code names/ring-parents.csv} and the plain carbocycles, and where a
@@ -17,7 +18,7 @@ final class RingParents {
   private final List<RingParent> carbocycles = new ArrayList<>();
 
   private RingParents() {
-    for (List<String> row : CsvTable.read("/names/ring-parents.csv")) {
+    for (List<String> row : CsvTable.read("/names/ring-parents.csv").rows()) {
       parents.add(parent(row.get(0), row.get(1), row.get(2).split(" "), row.get(3).equals("yes")));
     }
     for (int size = 3; size <= LARGEST_CARBOCYCLE; size++) {

@@ -4,6 +4,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.foreseal.quantity.CsvTable;
 
 /**
  * Formulas of small species that are accepted as input ({@code names/formulas.csv}). Several are
@@ -21,7 +22,7 @@ final class SmallFormulas {
   private final Map<String, Entry> entries = new LinkedHashMap<>();
 
   SmallFormulas() {
-    for (List<String> row : CsvTable.read("/names/formulas.csv")) {
+    for (List<String> row : CsvTable.read("/names/formulas.csv").rows()) {
       entries.put(row.get(0), new Entry(row.get(1), row.get(2)));
     }
   }

@@ -1,11 +1,5 @@
 package org.foreseal.run;
 
-import java.io.BufferedReader;
-import java.io.IOException;
-import java.io.InputStream;
-import java.io.InputStreamReader;
-import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Collection;
@@ -17,6 +11,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import org.foreseal.quantity.CsvTable;
 import org.foreseal.rule.Provision;
 
 /**
@@ -25,8 +20,6 @@ import org.foreseal.rule.Provision;
  * molecule that can react as such; why; source.
  */
 final class Catalogue {
-  private static final int COLUMNS = 6;
-
   private final List<Entry> entries;
   private final Map<String, Entry> byKey = new LinkedHashMap<>();
 
@@ -67,26 +60,11 @@ final class Catalogue {
 
   /** Reads a table of the resource folder {@code run}. */
   static Catalogue load(String file) {
-    try (InputStream in = Catalogue.class.getResourceAsStream("/run/" + file)) {
-      if (in == null) {
-        throw new IllegalStateException("this build lacks run/" + file);
-      }
-      return new Catalogue(
-          new BufferedReader(new InputStreamReader(in, StandardCharsets.UTF_8))
-              .lines()
-              .skip(1)
-              .map(line -> entry(line, file))
-              .toList());
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
+    return new Catalogue(
+        CsvTable.read("/run/" + file).rows().stream().map(cells -> entry(cells, file)).toList());
   }
 
-  private static Entry entry(String line, String file) {
-    List<String> cells = cells(line);
-    if (cells.size() != COLUMNS) {
-      throw new IllegalStateException(file + ": " + cells.size() + " cells in: " + line);
-    }
+  private static Entry entry(List<String> cells, String file) {
     EnumSet<Provision> roles = EnumSet.noneOf(Provision.class);
     for (String word : words(cells.get(2), " ")) {
       roles.add(
@@ -101,25 +79,6 @@ final class Catalogue {
         .map(String::strip)
         .filter(w -> !w.isEmpty())
         .toList();
-  }
-
-  private static List<String> cells(String line) {
-    List<String> cells = new ArrayList<>();
-    StringBuilder cell = new StringBuilder();
-    boolean quoted = false;
-    for (int i = 0; i < line.length(); i++) {
-      char c = line.charAt(i);
-      if (c == '"') {
-        quoted = !quoted;
-      } else if (c == ',' && !quoted) {
-        cells.add(cell.toString().strip());
-        cell.setLength(0);
-      } else {
-        cell.append(c);
-      }
-    }
-    cells.add(cell.toString().strip());
-    return cells;
   }
 
   Optional<Entry> find(String name) {

@@ -2,6 +2,7 @@ package org.foreseal.thermo;
 
 import java.util.HashMap;
 import java.util.Map;
+import org.foreseal.quantity.CsvTable;
 
 /**
  * Scale of the standard deviations and prior standard deviations of terms: sd^2 = residual^2 +
@@ -10,7 +11,7 @@ import java.util.Map;
 final class Calibration {
   private final Map<String, Double> values = new HashMap<>();
 
-  private Calibration(Table table) {
+  private Calibration(CsvTable table) {
     for (int row = 0; row < table.size(); row++) {
       for (String column : new String[] {"enthalpy", "entropy", "gibbs298", "gibbs573"}) {
         if (!table.isEmpty(row, column)) {
@@ -21,7 +22,7 @@ final class Calibration {
   }
 
   static Calibration read() {
-    return new Calibration(Table.read("calibration.csv"));
+    return new Calibration(CsvTable.read("/thermo/calibration.csv"));
   }
 
   private double get(String name) {

@@ -3,6 +3,7 @@ package org.foreseal.thermo;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
+import org.foreseal.quantity.CsvTable;
 
 /**
  * The fitted terms by feature, and the nearest known terms for those the entropy or heat-capacity
@@ -15,7 +16,7 @@ final class Coefficients {
   private int enthalpyTerms;
   private int entropyTerms;
 
-  private Coefficients(Table table, Table nearest) {
+  private Coefficients(CsvTable table, CsvTable nearest) {
     for (int row = 0; row < table.size(); row++) {
       Term term = term(table, row);
       terms.put(table.text(row, "feature"), term);
@@ -26,10 +27,11 @@ final class Coefficients {
   }
 
   static Coefficients read() {
-    return new Coefficients(Table.read("coefficients.csv"), Table.read("stand-ins.csv"));
+    return new Coefficients(
+        CsvTable.read("/thermo/coefficients.csv"), CsvTable.read("/thermo/stand-ins.csv"));
   }
 
-  private Term term(Table table, int row) {
+  private Term term(CsvTable table, int row) {
     boolean enthalpy = !table.isEmpty(row, "enthalpy");
     boolean entropy = !table.isEmpty(row, "entropy");
     boolean heatCapacity = !table.isEmpty(row, "cp300");
@@ -38,7 +40,7 @@ final class Coefficients {
         entropy ? entropyTerms++ : -1,
         enthalpy ? table.number(row, "enthalpy") : 0,
         entropy ? table.number(row, "entropy") : 0,
-        heatCapacity ? Optional.of(table.heatCapacity(row)) : Optional.empty());
+        heatCapacity ? Optional.of(HeatCapacity.of(table, row)) : Optional.empty());
   }
 
   int enthalpyTerms() {

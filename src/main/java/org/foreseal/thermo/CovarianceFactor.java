@@ -2,6 +2,7 @@ package org.foreseal.thermo;
 
 import java.nio.ByteBuffer;
 import java.nio.FloatBuffer;
+import org.foreseal.quantity.CsvTable;
 
 /**
  * Lower triangular factors L of the covariances of the enthalpy and entropy terms. The variance of
@@ -76,6 +77,6 @@ final class CovarianceFactor {
   /** Reads the factors once, on first use. */
   private static final class Holder {
     static final CovarianceFactor STANDARD =
-        new CovarianceFactor(ByteBuffer.wrap(Table.bytes("covariance-factor.bin")));
+        new CovarianceFactor(ByteBuffer.wrap(CsvTable.bytes("/thermo/covariance-factor.bin")));
   }
 }

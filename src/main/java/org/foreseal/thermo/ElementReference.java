@@ -4,6 +4,7 @@ import java.util.Map;
 import java.util.NavigableMap;
 import java.util.Optional;
 import java.util.TreeMap;
+import org.foreseal.quantity.CsvTable;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -15,7 +16,7 @@ final class ElementReference {
 
   private final Map<String, NavigableMap<Double, State>> states = new TreeMap<>();
 
-  private ElementReference(Table table) {
+  private ElementReference(CsvTable table) {
     for (int row = 0; row < table.size(); row++) {
       states
           .computeIfAbsent(table.text(row, "element"), e -> new TreeMap<>())
@@ -26,7 +27,7 @@ final class ElementReference {
   }
 
   static ElementReference read() {
-    return new ElementReference(Table.read("elements.csv"));
+    return new ElementReference(CsvTable.read("/thermo/elements.csv"));
   }
 
   /** Entropy at 298.15 K of the elements of a molecule, J/(mol K). */

@@ -1,5 +1,7 @@
 package org.foreseal.thermo;
 
+import org.foreseal.quantity.CsvTable;
+
 /**
  * Ideal-gas heat capacity, J/(mol K): linear between its values at 300, 400, 500, 600 and 800 K,
  * flat outside. Integrals are exact for that line.
@@ -20,6 +22,16 @@ public record HeatCapacity(
 
   private static final double REFERENCE_KELVIN = GasPhase.REFERENCE_KELVIN;
   private static final double JOULES_PER_KILOJOULE = 1000;
+
+  /** The heat capacity in the columns cp300 to cp800 of a table row. */
+  static HeatCapacity of(CsvTable table, int row) {
+    return new HeatCapacity(
+        table.number(row, "cp300"),
+        table.number(row, "cp400"),
+        table.number(row, "cp500"),
+        table.number(row, "cp600"),
+        table.number(row, "cp800"));
+  }
 
   /** Value at this temperature (K), J/(mol K). */
   public double at(double temperatureKelvin) {

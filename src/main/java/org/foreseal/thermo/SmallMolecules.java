@@ -6,13 +6,14 @@ import java.util.Map;
 import java.util.Optional;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.Smiles;
+import org.foreseal.quantity.CsvTable;
 import org.foreseal.quantity.Uncertain;
 
 /** Molecules read from a table, with its sources: resource {@code thermo/small-molecules.csv}. */
 final class SmallMolecules {
   private final Map<Molecule, Species> species = new HashMap<>();
 
-  private SmallMolecules(Table table, ElementReference elements) {
+  private SmallMolecules(CsvTable table, ElementReference elements) {
     for (int row = 0; row < table.size(); row++) {
       Molecule molecule = Smiles.read(table.text(row, "smiles"));
       ElementCounts counts = ElementCounts.of(molecule);
@@ -24,16 +25,16 @@ final class SmallMolecules {
   }
 
   static SmallMolecules read(ElementReference elements) {
-    return new SmallMolecules(Table.read("small-molecules.csv"), elements);
+    return new SmallMolecules(CsvTable.read("/thermo/small-molecules.csv"), elements);
   }
 
-  private static Thermochemistry thermochemistry(Table table, int row, double elementEntropy) {
+  private static Thermochemistry thermochemistry(CsvTable table, int row, double elementEntropy) {
     double enthalpySd = table.number(row, "enthalpy_sd");
     double entropySd = table.number(row, "entropy_sd");
     return new Thermochemistry(
         new Uncertain(table.number(row, "enthalpy"), enthalpySd),
         new Uncertain(table.number(row, "entropy"), entropySd),
-        table.heatCapacity(row),
+        HeatCapacity.of(table, row),
         1,
         1,
         Origin.TABULATED,

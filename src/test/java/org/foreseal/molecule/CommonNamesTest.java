@@ -10,6 +10,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import org.foreseal.quantity.CsvTable;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -23,7 +24,7 @@ class CommonNamesTest {
 
   private static Map<String, String> exceptions() {
     Map<String, String> systematic = new HashMap<>();
-    for (List<String> row : CsvTable.read("/molecule/opsin-exceptions.csv")) {
+    for (List<String> row : CsvTable.read("/molecule/opsin-exceptions.csv").rows()) {
       assertFalse(row.get(1).isBlank(), "no reason for " + row.get(0));
       systematic.put(row.get(0), row.get(2));
     }
@@ -77,7 +78,7 @@ class CommonNamesTest {
 
   @Test
   void noNameIsListedTwiceAndEachStructureIsWrittenOneWay() {
-    List<List<String>> rows = CsvTable.read("/names/common-names.csv");
+    List<List<String>> rows = CsvTable.read("/names/common-names.csv").rows();
     assertEquals(rows.size(), new CommonNames().all().size(), "a name stands twice");
     Map<String, String> smilesOfKey = new HashMap<>();
     for (List<String> row : rows) {

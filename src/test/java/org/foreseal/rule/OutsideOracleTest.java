@@ -18,6 +18,7 @@ import java.util.stream.Collectors;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.Outcome;
 import org.foreseal.molecule.Smiles;
+import org.foreseal.quantity.CsvTable;
 import org.junit.jupiter.api.Test;
 
 /**
@@ -35,8 +36,8 @@ class OutsideOracleTest {
   void productSetsEqualThoseOfAnIndependentToolkit() throws IOException {
     Map<String, Set<String>> oracle = oracle();
     Set<String> explained = new TreeSet<>();
-    for (String[] row : rows("known-differences.csv")) {
-      explained.add(row[0] + " " + row[1]);
+    for (List<String> row : rows("known-differences.csv")) {
+      explained.add(row.get(0) + " " + row.get(1));
     }
     List<String> differences = new ArrayList<>();
     Set<String> explainedAndSeen = new TreeSet<>();
@@ -64,8 +65,8 @@ class OutsideOracleTest {
   @Test
   void theOracleWasMadeWithTheseRules() throws Exception {
     Map<String, String> frozen = new HashMap<>();
-    for (String[] row : rows("rules-used.csv")) {
-      frozen.put(row[0], row[1]);
+    for (List<String> row : rows("rules-used.csv")) {
+      frozen.put(row.get(0), row.get(1));
     }
     Map<String, String> now = new HashMap<>();
     for (Rule rule : oneReactantRules()) {
@@ -97,39 +98,19 @@ class OutsideOracleTest {
 
   private static Map<String, Set<String>> oracle() throws IOException {
     Map<String, Set<String>> oracle = new HashMap<>();
-    for (String[] row : rows("one-reactant.csv")) {
+    for (List<String> row : rows("one-reactant.csv")) {
       Set<String> outcomes = new TreeSet<>();
-      for (String outcome : row[2].split("\\|", -1)) {
+      for (String outcome : row.get(2).split("\\|", -1)) {
         addUnlessUnchanged(
-            outcomes, Smiles.readAll(outcome).stream().sorted().toList(), Smiles.read(row[0]));
+            outcomes, Smiles.readAll(outcome).stream().sorted().toList(), Smiles.read(row.get(0)));
       }
-      oracle.put(row[0] + " " + row[1], outcomes);
+      oracle.put(row.get(0) + " " + row.get(1), outcomes);
     }
     return oracle;
   }
 
-  private static List<String[]> rows(String name) throws IOException {
-    return lines(name).stream().skip(1).map(OutsideOracleTest::cells).toList();
-  }
-
-  /** Cells of a CSV line whose quoted cells hold commas but no quotes. */
-  private static String[] cells(String line) {
-    List<String> cells = new ArrayList<>();
-    boolean quoted = false;
-    StringBuilder cell = new StringBuilder();
-    for (int i = 0; i < line.length(); i++) {
-      char c = line.charAt(i);
-      if (c == '"') {
-        quoted = !quoted;
-      } else if (c == ',' && !quoted) {
-        cells.add(cell.toString());
-        cell.setLength(0);
-      } else {
-        cell.append(c);
-      }
-    }
-    cells.add(cell.toString());
-    return cells.toArray(new String[0]);
+  private static List<List<String>> rows(String name) {
+    return CsvTable.read(FOLDER + name).rows();
   }
 
   private static List<String> lines(String name) throws IOException {
