@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 
 import java.util.List;
 import java.util.Optional;
+import org.foreseal.chromatography.WhereFound;
 import org.foreseal.molecule.Smiles;
 import org.foreseal.run.Comparison.Difference;
 import org.junit.jupiter.api.Test;
