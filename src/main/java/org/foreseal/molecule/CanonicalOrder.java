@@ -26,15 +26,41 @@ final class CanonicalOrder {
     CanonicalOrder order = new CanonicalOrder(graph);
     long[] value = new long[graph.size];
     for (int i = 0; i < graph.size; i++) {
-      value[i] =
-          (long) graph.element[i] << 32
-              | (long) (graph.charge[i] + 8) << 24
-              | (long) graph.hydrogens[i] << 16
-              | (long) graph.neighbours[i].length << 8
+      int atom =
+          graph.element[i] << 16
+              | (graph.charge[i] + 8) << 12
+              | graph.hydrogens[i] << 8
+              | graph.neighbours[i].length << 1
               | (graph.aromatic[i] ? 1 : 0);
+      value[i] = (long) atom << 32 | order.remoteness(i);
     }
     order.search(order.refine(order.classes(value)), new ArrayList<>());
     return order.bestRank;
+  }
+
+  /**
+   * Sum of the squared distances to all atoms: tells the places along a chain apart at once, where
+   * refinement alone would need a round for every bond.
+   */
+  private int remoteness(int start) {
+    int[] distance = new int[graph.size];
+    Arrays.fill(distance, -1);
+    int[] queue = new int[graph.size];
+    int tail = 0;
+    queue[tail++] = start;
+    distance[start] = 0;
+    int sum = 0;
+    for (int head = 0; head < tail; head++) {
+      int at = queue[head];
+      sum += distance[at] * distance[at];
+      for (int next : graph.neighbours[at]) {
+        if (distance[next] < 0) {
+          distance[next] = distance[at] + 1;
+          queue[tail++] = next;
+        }
+      }
+    }
+    return sum;
   }
 
   private static long mix(long x) {

@@ -3,6 +3,7 @@ package org.foreseal.molecule;
 import java.util.Set;
 import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
+import org.openscience.cdk.graph.Cycles;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
 import org.openscience.cdk.interfaces.IBond;
@@ -29,13 +30,21 @@ final class InputAtoms {
     this.start = start;
   }
 
-  /** Refuses unknown atoms, isotopes, foreign elements, bound metals and radicals. */
-  void check() {
+  /** Refuses unknown atoms and isotopes. */
+  void checkKinds() {
     for (IAtom atom : container.atoms()) {
       checkKind(atom);
+    }
+  }
+
+  /** Refuses foreign elements, bound metals, stray small letters, radicals, too many bonds. */
+  void checkBonds() {
+    Cycles.markRingAtomsAndBonds(container);
+    for (IAtom atom : container.atoms()) {
       if (!isMetalIon(atom)) {
         checkElement(atom);
-        checkRadical(atom);
+        checkRing(atom);
+        checkValence(atom);
       }
     }
   }
@@ -79,20 +88,33 @@ final class InputAtoms {
     }
   }
 
-  private void checkRadical(IAtom atom) {
+  private void checkRing(IAtom atom) {
+    if (atom.isAromatic() && !atom.isInRing()) {
+      throw bad(
+          atom,
+          "an aromatic atom outside a ring",
+          "small letters are for aromatic rings: write " + atom.getSymbol());
+    }
+  }
+
+  private void checkValence(IAtom atom) {
     int bonds = hydrogens(atom);
     for (IBond bond : atom.bonds()) {
       bonds += bond.getOrder().numeric();
     }
     ChemicalElement e = ChemicalElement.require(atom.getAtomicNumber());
-    if (charge(atom) == 0 && !e.allowsValence(0, bonds) && lacksBonds(e, bonds)) {
-      throw bad(
-          atom,
-          e.symbol() + " with " + bonds + (bonds == 1 ? " bond" : " bonds") + " is a radical",
-          e == ChemicalElement.C && bonds == 2
-              ? "carbon monoxide is [C-]#[O+]; otherwise give every carbon four bonds"
-              : "give the closed-shell molecule; atoms in brackets need their hydrogens written");
+    if (charge(atom) != 0 || e.allowsValence(0, bonds)) {
+      return;
     }
+    if (!lacksBonds(e, bonds)) {
+      throw bad(atom, e.symbol() + " with " + bonds + " bonds", "check the valences of this atom");
+    }
+    throw bad(
+        atom,
+        e.symbol() + " with " + bonds + (bonds == 1 ? " bond" : " bonds") + " is a radical",
+        e == ChemicalElement.C && bonds == 2
+            ? "carbon monoxide is [C-]#[O+]; otherwise give every carbon four bonds"
+            : "give the closed-shell molecule; atoms in brackets need their hydrogens written");
   }
 
   private static boolean lacksBonds(ChemicalElement e, int bonds) {

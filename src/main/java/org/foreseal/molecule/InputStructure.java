@@ -74,11 +74,14 @@ final class InputStructure {
   }
 
   private Result run() {
-    new InputAtoms(container, offsets, start).check();
+    InputAtoms atoms = new InputAtoms(container, offsets, start);
+    atoms.checkKinds();
+    boolean rewritten = PentavalentNitrogen.rewrite(container);
+    atoms.checkBonds();
     if (container.stereoElements().iterator().hasNext()) {
       notes.add("stereochemistry is set aside: all stereoisomers count as one species");
     }
-    if (PentavalentNitrogen.rewrite(container)) {
+    if (rewritten) {
       notes.add("nitrogen drawn with five bonds is taken charge-separated, as in [N+](=O)[O-]");
     }
     refuseOrganometallic();

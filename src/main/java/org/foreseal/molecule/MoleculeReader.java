@@ -33,6 +33,7 @@ public final class MoleculeReader {
   private static final int MOST_ATOMS_WRITTEN = 250;
   private static final Pattern REGISTRY_NUMBER = Pattern.compile("\\d{2,7}-\\d{2}-\\d");
   private static final Pattern INCHI_KEY = Pattern.compile("[A-Z]{14}-[A-Z]{10}-[A-Z]");
+  private static final Pattern SEVERAL = Pattern.compile("\\s*[;+,]\\s+|\\s+[+]\\s*|\\s+and\\s+");
   private static final Pattern FORMULA = Pattern.compile("(?=.*\\d)(?=.*H)([A-Z][a-z]?\\d*)+");
 
   private final MoleculeNames names;
@@ -195,6 +196,18 @@ public final class MoleculeReader {
   }
 
   private BadInputException unknown(String text, Place start) {
+    List<String> parts = SEVERAL.splitAsStream(text).toList();
+    if (parts.size() > 1 && parts.stream().allMatch(p -> names.curated(p).isPresent())) {
+      return new BadInputException(
+          start, parts.size() + " molecules in one text", "give each molecule on its own");
+    }
+    String first = text.split("\\s", 2)[0];
+    if (first.length() < text.length() && first.length() > 1 && SmilesText.isAllTokens(first)) {
+      return new BadInputException(
+          InputAtoms.shifted(start, first.length() + 1),
+          "text after the SMILES",
+          "write the SMILES alone or the name alone");
+    }
     List<String> near = names.closest(text);
     String hint =
         near.isEmpty()

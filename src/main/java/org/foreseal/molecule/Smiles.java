@@ -88,6 +88,6 @@ public final class Smiles {
   private static String problem(InvalidSmilesException e) {
     String first = String.valueOf(e.getMessage()).lines().findFirst().orElse("");
     int comma = first.lastIndexOf("', ");
-    return comma >= 0 ? first.substring(comma + 3) : first;
+    return (comma >= 0 ? first.substring(comma + 3) : first).replaceAll(":$", "");
   }
 }

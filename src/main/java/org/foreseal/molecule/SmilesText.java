@@ -17,6 +17,10 @@ final class SmilesText {
   /** Names never hold these. */
   private static final Pattern ONLY_IN_SMILES = Pattern.compile("[=#@>$\\\\]");
 
+  /** A bond or dot at either end, before a closing bracket, or beside a dot. */
+  private static final Pattern DANGLING =
+      Pattern.compile("^[-=#:/\\\\.]|[-=#:/\\\\.]$|[-=#:/\\\\.][).]|\\.[-=#:/\\\\]");
+
   private SmilesText() {}
 
   /** True when the whole text is made of SMILES tokens, or holds a character no name has. */
@@ -92,7 +96,14 @@ final class SmilesText {
         return found;
       }
     }
-    return Optional.empty();
+    Matcher dangling = DANGLING.matcher(smiles);
+    return dangling.find()
+        ? Optional.of(
+            new Trouble(
+                dangling.start(),
+                "a bond or dot that joins nothing",
+                "write an atom on both sides of it"))
+        : Optional.empty();
   }
 
   private static Optional<Trouble> troubleAt(char c, int offset) {

@@ -104,6 +104,9 @@ public final class RouteFinder {
 
   /** Up to {@code most} routes to a species, cheapest first; none for the charge itself. */
   public List<Route> routesTo(int target, int most) {
+    if (network.species().get(target).depth() == 0) {
+      return List.of();
+    }
     PriorityQueue<PartialRoute> agenda =
         new PriorityQueue<>(
             Comparator.comparingDouble(PartialRoute::bound)

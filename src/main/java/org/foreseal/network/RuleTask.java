@@ -159,15 +159,22 @@ final class RuleTask {
 
   /**
    * A guard that looks at reactants only is asked before the reaction is carried out. Where it
-   * refuses, the products are still worked out for the list of what was ruled out when something
-   * that was charged takes part; the countless refused meetings of products with products are not.
+   * refuses, the products are still worked out for the list of what was ruled out when all partners
+   * are part of the charge or a single one is at most one step away from it; refused meetings
+   * further on are countless and interest nobody.
    */
   private boolean isWorthApplying(DepthView view, int[] chosen, List<Molecule> reactants) {
-    boolean chargedTakesPart =
-        Arrays.stream(chosen)
-            .mapToObj(view::species)
-            .anyMatch(s -> s.depth() == 0 && !isAmbient(s));
-    return chargedTakesPart || !rule.refusesReactants(reactants, surroundings);
+    int partners = 0;
+    int deepest = 0;
+    for (int id : chosen) {
+      Species s = view.species(id);
+      if (!isAmbient(s)) {
+        partners++;
+        deepest = Math.max(deepest, s.depth());
+      }
+    }
+    boolean near = deepest == 0 || (partners == 1 && deepest == 1);
+    return near || !rule.refusesReactants(reactants, surroundings);
   }
 
   private static Outcome shared(DepthView view, Outcome outcome) {

@@ -43,7 +43,9 @@ public sealed interface Guard {
     /** When the molecule looked at was put in by the user. */
     CHARGED,
     /** When all partners were put in by the user. */
-    ALL_CHARGED
+    ALL_CHARGED,
+    /** When at least one partner was put in by the user. */
+    ANY_CHARGED
   }
 
   /**
@@ -64,8 +66,7 @@ public sealed interface Guard {
 
     @Override
     public boolean refuses(Attempt attempt) {
-      if (unless == Unless.ALL_CHARGED
-          && attempt.partners().stream().allMatch(attempt::isCharged)) {
+      if (isLiftedFor(attempt)) {
         return false;
       }
       for (int i = 0; i < attempt.reactants().size(); i++) {
@@ -76,6 +77,14 @@ public sealed interface Guard {
         }
       }
       return false;
+    }
+
+    private boolean isLiftedFor(Attempt attempt) {
+      return switch (unless) {
+        case ALL_CHARGED -> attempt.partners().stream().allMatch(attempt::isCharged);
+        case ANY_CHARGED -> attempt.partners().stream().anyMatch(attempt::isCharged);
+        case NEVER, CHARGED -> false;
+      };
     }
 
     private boolean exceeds(Molecule m) {

@@ -64,9 +64,10 @@ final class GuardReader {
     return switch (word.text()) {
       case "charged" -> Guard.Unless.CHARGED;
       case "all-charged" -> Guard.Unless.ALL_CHARGED;
+      case "any-charged" -> Guard.Unless.ANY_CHARGED;
       default ->
           throw word.complaint(
-              "a guard is lifted 'unless: charged' or 'unless: all-charged'", "use one of them");
+              "a guard is lifted unless: charged, any-charged or all-charged", "use one of them");
     };
   }
 

@@ -48,17 +48,7 @@ class CoverageBenchmarkTest {
     List<Integer> sizes = new ArrayList<>();
     for (PublishedExperiment e : PublishedExperiment.all()) {
       if (e.scored()) {
-        long start = System.nanoTime();
         Network network = grow(library, e);
-        System.out.println(
-            e.id()
-                + " "
-                + network.species().size()
-                + " species "
-                + network.steps().size()
-                + " steps "
-                + (System.nanoTime() - start) / 1000000
-                + " ms");
         sizes.add(network.species().size());
         if (network.isCut()) {
           cut.add(e.id() + " " + network.stoppedBy());
