@@ -27,12 +27,21 @@ final class GeneratedName {
     if (molecule.netCharge() != 0 || molecule.formula().count(ChemicalElement.C) == 0) {
       return Optional.empty();
     }
-    return NameGraph.of(molecule).flatMap(g -> new GeneratedName(g).name());
+    Optional<NameGraph> graph = NameGraph.of(molecule, true);
+    Optional<String> name = graph.flatMap(g -> new GeneratedName(g).name());
+    boolean fixed = graph.map(GeneratedName::hasFixedParent).orElse(false);
+    return fixed
+        ? name.or(() -> NameGraph.of(molecule, false).flatMap(g -> new GeneratedName(g).name()))
+        : name;
+  }
+
+  private static boolean hasFixedParent(NameGraph g) {
+    return g.systems().stream().anyMatch(RingSystem::isFixed);
   }
 
   private Optional<String> name() {
     Optional<PrincipalGroup> senior = senior();
-    if (g.systems().stream().anyMatch(RingSystem::isFixed)) {
+    if (hasFixedParent(g)) {
       boolean lower = senior.map(s -> s.compareTo(PrincipalGroup.KETONE) >= 0).orElse(true);
       return lower ? ring.plain().map(RingName.Plain::text) : Optional.empty();
     }

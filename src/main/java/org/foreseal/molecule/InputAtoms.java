@@ -107,7 +107,10 @@ final class InputAtoms {
       return;
     }
     if (!lacksBonds(e, bonds)) {
-      throw bad(atom, e.symbol() + " with " + bonds + " bonds", "check the valences of this atom");
+      throw bad(
+          atom,
+          "not a molecule: " + e.symbol() + " cannot carry " + bonds + " bonds",
+          "check the valences of this atom");
     }
     throw bad(
         atom,

@@ -31,8 +31,8 @@ final class NameGraph {
     }
   }
 
-  static Optional<NameGraph> of(Molecule m) {
-    Optional<List<RingSystem>> systems = RingParents.builtIn().systems(m);
+  static Optional<NameGraph> of(Molecule m, boolean fixedParents) {
+    Optional<List<RingSystem>> systems = RingParents.builtIn().systems(m, fixedParents);
     if (systems.isEmpty()) {
       return Optional.empty();
     }
@@ -107,18 +107,19 @@ final class NameGraph {
     return Optional.of(Set.of(g));
   }
 
-  /** Only the plain carbocycles may carry double bonds outwards, and only to oxygen. */
+  /** A ring atom may carry a double bond to oxygen, to carbon or to the nitrogen of an imine. */
   private Optional<Set<PrincipalGroup>> ringGroup(int atom) {
-    RingSystem system = systems.get(systemOf[atom]);
     if (m.charge(atom) != 0) {
       return Optional.empty();
     }
     for (int k = 0; k < m.degree(atom); k++) {
       int other = m.neighbour(atom, k);
       if (systemOf[other] != systemOf[atom] && m.order(atom, k) > 1) {
-        return system.isCarbocycle() && isCarbonylOxygen(other)
-            ? one(PrincipalGroup.KETONE)
-            : Optional.empty();
+        if (isCarbonylOxygen(other)) {
+          return one(PrincipalGroup.KETONE);
+        }
+        boolean ylidene = is(other, ChemicalElement.C) || isImineOf(other);
+        return ylidene ? none() : Optional.empty();
       }
     }
     return none();

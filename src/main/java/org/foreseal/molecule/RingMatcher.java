@@ -53,11 +53,20 @@ final class RingMatcher {
         p.element(model) == m.element(atom)
             && p.charge(model) == m.charge(atom)
             && p.isAromatic(model) == m.isAromatic(atom)
-            && m.degree(atom) - p.degree(model) + m.hydrogens(atom) == p.hydrogens(model);
+            && outward(atom) + m.hydrogens(atom) == p.hydrogens(model);
     for (int i = 0; alike && i < next; i++) {
       alike = code(p, model, parent.order().get(i)) == code(m, atom, image[i]);
     }
     return alike;
+  }
+
+  /** Bonds that leave the ring; a double one takes the place of two hydrogens of the parent. */
+  private int outward(int atom) {
+    int total = 0;
+    for (int k = 0; k < m.degree(atom); k++) {
+      total += atoms.contains(m.neighbour(atom, k)) ? 0 : m.order(atom, k);
+    }
+    return total;
   }
 
   private static int code(Molecule m, int a, int b) {

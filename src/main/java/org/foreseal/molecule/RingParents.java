@@ -57,11 +57,15 @@ final class RingParents {
     return List.copyOf(parents);
   }
 
-  /** Every ring system of a molecule, or nothing when one is not known. */
-  Optional<List<RingSystem>> systems(Molecule m) {
+  /**
+   * Every ring system of a molecule, or nothing when one is not known.
+   *
+   * @param fixed whether 1-indanone is to be found as such; else it is an indane with a carbonyl
+   */
+  Optional<List<RingSystem>> systems(Molecule m, boolean fixed) {
     List<RingSystem> result = new ArrayList<>();
     for (List<Integer> atoms : components(m)) {
-      Optional<RingSystem> system = recognise(m, atoms);
+      Optional<RingSystem> system = recognise(m, atoms, fixed);
       if (system.isEmpty()) {
         return Optional.empty();
       }
@@ -101,17 +105,22 @@ final class RingParents {
     return new ArrayList<>(found);
   }
 
-  private Optional<RingSystem> recognise(Molecule m, List<Integer> atoms) {
-    for (RingParent parent : parents) {
-      Optional<RingSystem> found =
-          parent.kind() == RingParent.Kind.FIXED
-              ? match(m, parent, withCarbonylOxygens(m, atoms))
-              : match(m, parent, atoms);
+  private Optional<RingSystem> recognise(Molecule m, List<Integer> atoms, boolean fixed) {
+    List<Integer> withOxygens = withCarbonylOxygens(m, atoms);
+    if (fixed && withOxygens.size() > atoms.size()) {
+      Optional<RingSystem> found = first(m, withOxygens, true);
       if (found.isPresent()) {
         return found;
       }
     }
-    return carbocycle(m, atoms);
+    return first(m, atoms, false).or(() -> carbocycle(m, atoms));
+  }
+
+  private Optional<RingSystem> first(Molecule m, List<Integer> atoms, boolean fixed) {
+    return parents.stream()
+        .filter(p -> fixed == (p.kind() == RingParent.Kind.FIXED))
+        .flatMap(p -> match(m, p, atoms).stream())
+        .findFirst();
   }
 
   private static Optional<RingSystem> match(Molecule m, RingParent parent, List<Integer> atoms) {

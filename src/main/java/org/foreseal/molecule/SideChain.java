@@ -22,7 +22,7 @@ final class SideChain {
     return new Chains(g, substituents, Set.of()).bestFrom(atom, on).map(SideChain::name);
   }
 
-  /** Hexylidene, benzylidene: what a nitrogen carries by a double bond. */
+  /** Hexylidene, benzylidene: what hangs on by a double bond. */
   static Optional<Prefix> ylidene(NameGraph g, Substituents substituents, int atom, int on) {
     return new Chains(g, substituents, Set.of())
         .bestFrom(atom, on)

@@ -43,8 +43,10 @@ final class Substituents {
     if (order == 2 && g.is(atom, ChemicalElement.O)) {
       return Optional.of(Prefix.simple("oxo"));
     }
-    if (order == 2 && g.is(on, ChemicalElement.N) && g.isChainCarbon(atom)) {
-      return SideChain.ylidene(g, this, atom, on);
+    if (order == 2 && g.is(atom, ChemicalElement.C)) {
+      return g.inRing(atom)
+          ? ringPrefix(atom, on).map(p -> new Prefix(p.text() + "idene", p.complex()))
+          : SideChain.ylidene(g, this, atom, on);
     }
     if (order != 1) {
       return Optional.empty();

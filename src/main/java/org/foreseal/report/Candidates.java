@@ -47,4 +47,9 @@ final class Candidates {
         .flatMap(s -> s.deltaGibbs().stream())
         .max(Comparator.comparingDouble(Uncertain::value));
   }
+
+  /** How many steps the best route takes, side branches included; 0 for what was charged. */
+  static int steps(Candidate candidate) {
+    return bestRoute(candidate).map(r -> r.steps().size()).orElse(candidate.depth());
+  }
 }

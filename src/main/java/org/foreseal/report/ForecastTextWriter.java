@@ -113,7 +113,7 @@ public final class ForecastTextWriter {
         c.name(),
         c.molecule().formula().toString(),
         Figures.score(c.score()),
-        Integer.toString(c.depth()),
+        Integer.toString(Candidates.steps(c)),
         Candidates.hurdle(c).map(Figures::gibbs).orElse("not known"));
   }
 

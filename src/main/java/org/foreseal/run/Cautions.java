@@ -21,33 +21,24 @@ final class Cautions {
 
   private static Map<Molecule, String> table() {
     Map<Molecule, String> table = new LinkedHashMap<>();
-    put(
-        table,
-        "[H][H]",
-        "hydrogen: flammable gas under pressure; the maker's rating of the vessel decides");
-    put(table, "[C-]#[O+]", "carbon monoxide: toxic gas without smell; " + HOOD);
+    put(table, "[H][H]", "flammable gas under pressure; the maker's rating of the vessel decides");
+    put(table, "[C-]#[O+]", "toxic gas without smell; " + HOOD);
     put(
         table,
         "O=C=O",
-        "carbon dioxide: gas pressure in a sealed vessel; the maker's rating of the vessel decides");
-    put(table, "S", "hydrogen sulfide: toxic, dulls the sense of smell; " + HOOD);
-    put(table, "N", "ammonia: toxic, corrosive gas; " + HOOD);
-    put(table, "C#N", "hydrogen cyanide: very toxic; " + HOOD);
-    put(
-        table,
-        "C",
-        "methane: flammable gas under pressure; the maker's rating of the vessel decides");
-    put(table, "c1ccccc1", "benzene: carcinogen; " + HOOD);
-    put(table, "C=O", "formaldehyde: carcinogen; " + HOOD);
-    put(table, "C=CC=O", "acrolein: very toxic and irritant; " + HOOD);
-    put(table, "CS", "methanethiol: toxic gas; " + HOOD);
-    put(
-        table,
-        "C=C",
-        "ethene: flammable gas under pressure; the maker's rating of the vessel decides");
-    put(table, "c1ccc2ccccc2c1", "naphthalene: suspected carcinogen; " + HOOD);
-    put(table, "NN", "hydrazine: toxic, can explode; " + HOOD);
-    put(table, "NO", "hydroxylamine: can explode when heated; " + HOOD);
+        "gas pressure in a sealed vessel; the maker's rating of the vessel decides");
+    put(table, "S", "toxic, dulls the sense of smell; " + HOOD);
+    put(table, "N", "toxic, corrosive gas; " + HOOD);
+    put(table, "C#N", "very toxic; " + HOOD);
+    put(table, "C", "flammable gas under pressure; the maker's rating of the vessel decides");
+    put(table, "c1ccccc1", "carcinogen; " + HOOD);
+    put(table, "C=O", "carcinogen; " + HOOD);
+    put(table, "C=CC=O", "very toxic and irritant; " + HOOD);
+    put(table, "CS", "toxic gas; " + HOOD);
+    put(table, "C=C", "flammable gas under pressure; the maker's rating of the vessel decides");
+    put(table, "c1ccc2ccccc2c1", "suspected carcinogen; " + HOOD);
+    put(table, "NN", "toxic, can explode; " + HOOD);
+    put(table, "NO", "can explode when heated; " + HOOD);
     return Map.copyOf(table);
   }
 

@@ -120,7 +120,7 @@ public final class Forecaster implements Engine {
   }
 
   private static List<String> sources(Rule rule) {
-    return rule.sources().stream().map(Forecaster::words).toList();
+    return rule.sources().stream().map(Forecaster::words).distinct().toList();
   }
 
   private static String words(Citation source) {

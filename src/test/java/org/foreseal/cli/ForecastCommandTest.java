@@ -108,7 +108,7 @@ class ForecastCommandTest {
 
   @Test
   void setsTemperaturesSideBySide() {
-    CommandRun run = CommandRun.of("forecast", SHEET);
+    CommandRun run = CommandRun.of("forecast", SHEET, "--temperature", "260C,300C");
     assertTrue(run.out().contains("260 C"));
     assertTrue(run.out().contains("300 C"));
   }

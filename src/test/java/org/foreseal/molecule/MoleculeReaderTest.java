@@ -152,7 +152,7 @@ class MoleculeReaderTest {
     "CC[13CH3], 3, isotope",
     "CC([2H])C, 4, isotope",
     "C[CH]C, 2, radical",
-    "CC(C)(C)(C)C, 2, C with 5 bonds",
+    "CC(C)(C)(C)C, 2, cannot carry 5 bonds",
     "CC[Mg]Br, 3, metal",
     "CC[SiH3], 3, element",
     "CC>>CO, 3, reaction",

@@ -85,8 +85,14 @@ final class RandomMolecules {
 
   private String ring(int depth) {
     String d = Integer.toString(depth + 1);
-    return switch (random.nextInt(8)) {
+    return switch (random.nextInt(14)) {
       case 0 -> "C" + d + "CCCC" + d;
+      case 7 -> "C" + d + "C(=O)c6ccccc6C" + d;
+      case 8 -> "C" + d + "CC(=O)OC" + d;
+      case 9 -> "C" + d + "C(=C" + part(depth - 1) + ")CCC" + d;
+      case 10 -> "C(=C" + d + "CCCC" + d + ")" + part(depth - 1);
+      case 11 -> "N" + d + "CCC(" + part(depth - 1) + ")C" + d + "=O";
+      case 12 -> "C" + d + "CC(=O)c6cc(" + part(depth - 1) + ")ccc6C" + d;
       case 1 -> "C" + d + "CCCCC" + d;
       case 2 -> "C" + d + "CCC(" + part(depth - 1) + ")CC" + d;
       case 3 -> "C" + d + "=CCCCC" + d;
