@@ -30,8 +30,14 @@ final class Candidates {
   static String madeBy(Candidate candidate) {
     return bestRoute(candidate)
         .filter(r -> !r.steps().isEmpty())
-        .map(r -> r.steps().get(r.steps().size() - 1).title())
+        .map(r -> brief(r.steps().get(r.steps().size() - 1).title()))
         .orElse("");
+  }
+
+  /** A title without what it adds behind a colon or in brackets at its end. */
+  static String brief(String title) {
+    String beforeColon = title.split(": ", 2)[0];
+    return beforeColon.replaceFirst("\\s+\\([^()]*\\)$", "");
   }
 
   /** The Gibbs energy of the step that is most uphill on the best route. */

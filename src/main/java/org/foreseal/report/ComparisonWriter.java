@@ -23,7 +23,7 @@ import org.foreseal.run.RunSheet;
 public final class ComparisonWriter {
   private static final int WIDTH = TextTable.WIDTH;
   private static final int ROOM_FOR_LABELS = 40;
-  private static final int USUAL_DIFFERENCES = 12;
+  private static final int USUAL_NAMES_PER_LINE = 6;
   private static final int MOST_COLUMNS = 8;
   private static final String ABSENT = "-";
 
@@ -98,13 +98,14 @@ public final class ComparisonWriter {
 
   /** What a heading stands for, where that is not plain from the heading itself. */
   private static void legend(String heading, String label, String solids, StringBuilder text) {
-    List<String> parts = new ArrayList<>();
-    parts.add(heading.equals(label) ? "" : label);
-    parts.add(label.contains(solids) ? "" : solids);
-    String all = String.join(": ", parts.stream().filter(p -> !p.isEmpty()).toList());
-    if (!all.isEmpty()) {
-      text.append(Wrap.paragraph("  " + heading + "  ", "    ", all, WIDTH));
+    if (heading.equals(label)) {
+      boolean saysMore = !solids.isEmpty() && !solids.equals(label);
+      String head = solids.startsWith(label) ? "  " : "  " + heading + ": ";
+      text.append(saysMore ? Wrap.paragraph(head, "    ", solids, WIDTH) : "");
+      return;
     }
+    String more = solids.isEmpty() || label.contains(solids) ? "" : ": " + solids;
+    text.append(Wrap.paragraph("  " + heading + "  ", "    ", label + more, WIDTH));
   }
 
   private static void table(
@@ -155,29 +156,34 @@ public final class ComparisonWriter {
     for (int i = 0; i < headings.size(); i++) {
       headingOf.put(comparison.runs().get(i).label(), headings.get(i));
     }
-    int most = rows == Integer.MAX_VALUE ? rows : USUAL_DIFFERENCES;
-    differences.stream().limit(most).forEach(d -> difference(d, headingOf, text));
-    if (differences.size() > most) {
-      text.append("  ... and " + (differences.size() - most) + " more; --all lists them\n");
+    Map<String, List<String>> namesByWords = new LinkedHashMap<>();
+    for (Difference difference : differences) {
+      namesByWords
+          .computeIfAbsent(words(difference, headingOf), w -> new ArrayList<>())
+          .add(difference.product().name());
     }
+    int most = rows == Integer.MAX_VALUE ? rows : USUAL_NAMES_PER_LINE;
+    namesByWords.forEach(
+        (words, names) ->
+            text.append(
+                Wrap.paragraph("  ", "    ", Names.some(names, most) + ": " + words, WIDTH)));
   }
 
-  private static void difference(
-      Difference difference, Map<String, String> headingOf, StringBuilder text) {
+  /** Which runs show it, which do not, and why. */
+  private static String words(Difference difference, Map<String, String> headingOf) {
     Map<String, List<String>> byReason = new LinkedHashMap<>();
     for (Missing missing : difference.missing()) {
       byReason
           .computeIfAbsent(missing.reason(), r -> new ArrayList<>())
           .add(headingOf.getOrDefault(missing.label(), missing.label()));
     }
-    List<String> parts = new ArrayList<>();
     List<String> shown =
         difference.shownBy().stream().map(l -> headingOf.getOrDefault(l, l)).toList();
+    List<String> parts = new ArrayList<>();
     parts.add("with " + String.join(", ", shown));
     byReason.forEach(
         (reason, labels) -> parts.add("not with " + String.join(", ", labels) + ": " + reason));
-    String line = difference.product().name() + ": " + String.join("; ", parts);
-    text.append(Wrap.paragraph("  ", "    ", line, WIDTH));
+    return String.join("; ", parts);
   }
 
   private static void notes(Comparison comparison, StringBuilder text) {

@@ -9,7 +9,6 @@ import java.util.stream.Stream;
 import org.foreseal.report.TextTable.Column;
 import org.foreseal.run.Candidate;
 import org.foreseal.run.Forecast;
-import org.foreseal.run.ForecastRoute;
 import org.foreseal.run.RuledOut;
 import org.foreseal.run.RunSheet;
 
@@ -68,13 +67,15 @@ public final class ForecastTextWriter {
   private void cautions() {
     Map<String, List<String>> byCaution = new LinkedHashMap<>();
     for (Candidate candidate : forecast.candidates()) {
+      String own = candidate.name() + ": ";
       for (String caution : candidate.cautions()) {
-        byCaution.computeIfAbsent(caution, c -> new ArrayList<>()).add(candidate.name());
+        String remark = caution.startsWith(own) ? caution.substring(own.length()) : caution;
+        byCaution.computeIfAbsent(remark, c -> new ArrayList<>()).add(candidate.name());
       }
     }
     byCaution.forEach(
         (caution, names) ->
-            line("caution", List.of(some(names, USUAL_NAMES_PER_REASON) + ": " + caution)));
+            line("caution", List.of(Names.some(names, USUAL_NAMES_PER_REASON) + ": " + caution)));
   }
 
   private void line(String label, List<String> values) {
@@ -121,7 +122,7 @@ public final class ForecastTextWriter {
     String route =
         Candidates.bestRoute(c).stream()
             .flatMap(r -> r.steps().stream())
-            .map(ForecastRoute.Step::title)
+            .map(step -> Candidates.brief(step.title()))
             .distinct()
             .collect(Collectors.joining(", then "));
     String needs = c.needs().isEmpty() ? "" : "needs " + String.join(", ", c.needs());
@@ -199,17 +200,11 @@ public final class ForecastTextWriter {
   private void ruledOut(String reason, List<RuledOut> outs) {
     int most = listsAll() ? rows : USUAL_NAMES_PER_REASON;
     List<String> names = outs.stream().map(ForecastTextWriter::nameWithDetail).distinct().toList();
-    text.append(Wrap.paragraph("  ", "    ", some(names, most) + ": " + reason, WIDTH));
+    text.append(Wrap.paragraph("  ", "    ", Names.some(names, most) + ": " + reason, WIDTH));
   }
 
   private static String nameWithDetail(RuledOut out) {
     return out.detail().isEmpty() ? out.name() : out.name() + " (" + out.detail() + ")";
-  }
-
-  private static String some(List<String> names, int most) {
-    List<String> distinct = names.stream().distinct().toList();
-    String shown = String.join(", ", distinct.subList(0, Math.min(most, distinct.size())));
-    return distinct.size() > most ? shown + " and " + (distinct.size() - most) + " more" : shown;
   }
 
   private void more(int all, int shown, String what) {

@@ -81,9 +81,10 @@ public final class RoutesWriter {
 
   private static void notes(RouteReport report, StringBuilder text) {
     text.append("\nNotes\n");
-    report.sheet().notes().forEach(n -> note(n, text));
-    report.sheet().outsideUsualRange().forEach(n -> note(n, text));
-    report.notes().forEach(n -> note(n, text));
+    Set<String> notes = new LinkedHashSet<>(report.sheet().notes());
+    notes.addAll(report.sheet().outsideUsualRange());
+    notes.addAll(report.notes());
+    notes.forEach(n -> note(n, text));
     note("searched " + RunWords.network(report.network()), text);
     note(RunWords.SEALED_VESSEL, text);
   }

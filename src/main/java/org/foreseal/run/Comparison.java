@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
+import java.util.function.Predicate;
 import org.foreseal.molecule.Molecule;
 
 /**
@@ -138,12 +139,44 @@ public record Comparison(List<Run> runs) {
         : Optional.of(new Difference(product, shownBy, missing));
   }
 
-  private static String reason(Product product, OptionalDouble score, Forecast forecast) {
-    String smiles = product.molecule().smiles();
-    return forecast.ruledOut().stream()
-        .filter(r -> r.smiles().equals(smiles))
+  /**
+   * Why a run does not show a product: the step of the others' best route that it refuses, else any
+   * refusal of the product or of something on the way.
+   */
+  private String reason(Product product, OptionalDouble score, Forecast forecast) {
+    if (score.isPresent()) {
+      return "listed, but far lower";
+    }
+    List<ForecastRoute.Step> steps = bestRoute(product);
+    List<RuledOut> refused = forecast.ruledOut();
+    return first(refused, r -> steps.stream().anyMatch(s -> makes(s, r) && isBy(s, r)))
+        .or(() -> first(refused, r -> r.smiles().equals(product.molecule().smiles())))
+        .or(() -> first(refused, r -> steps.stream().anyMatch(s -> makes(s, r))))
         .map(RuledOut::reason)
-        .findFirst()
-        .orElse(score.isPresent() ? "listed, but far lower" : "no route to it there");
+        .orElse("no route to it there");
+  }
+
+  private List<ForecastRoute.Step> bestRoute(Product product) {
+    return runs.stream()
+        .flatMap(r -> r.forecast().candidates().stream())
+        .filter(c -> c.molecule().equals(product.molecule()))
+        .max(Comparator.comparingDouble(Candidate::score))
+        .flatMap(c -> c.routes().stream().findFirst())
+        .map(ForecastRoute::steps)
+        .orElse(List.of());
+  }
+
+  private static Optional<RuledOut> first(List<RuledOut> all, Predicate<RuledOut> wanted) {
+    return all.stream().filter(wanted).findFirst();
+  }
+
+  private static boolean isBy(ForecastRoute.Step step, RuledOut refused) {
+    return step.rule().equals(refused.rule());
+  }
+
+  /** Whether the refused molecule stands on the right of the step's equation. */
+  private static boolean makes(ForecastRoute.Step step, RuledOut refused) {
+    String right = step.equationSmiles().substring(step.equationSmiles().indexOf(" = ") + 1);
+    return (right + " ").contains(" " + refused.smiles() + " ");
   }
 }

@@ -93,6 +93,43 @@ class ComparisonTest {
   }
 
   @Test
+  void looksForTheReasonAlongTheRouteOfTheOthers() {
+    String acetaldehyde = Smiles.read("CC=O").smiles();
+    ForecastRoute.Step step =
+        new ForecastRoute.Step(
+            "oxidation",
+            "oxidation",
+            "",
+            "CCO = " + acetaldehyde + " + [H][H]",
+            Optional.empty(),
+            List.of());
+    Candidate acid =
+        new Candidate(
+            1,
+            "acid",
+            Smiles.read("CC(=O)O"),
+            false,
+            true,
+            0.5,
+            WhereFound.EXTRACT,
+            true,
+            2,
+            List.of(),
+            List.of(),
+            List.of(new ForecastRoute(0.5, List.of(step))));
+    RuledOut onTheWay = new RuledOut(acetaldehyde, "acetaldehyde", "oxidation", "no iron", "");
+    Comparison comparison =
+        new Comparison(
+            List.of(
+                run("a", List.of(acid), Optional.empty()),
+                run("b", List.of(), Optional.of(onTheWay)),
+                run("c", List.of(), Optional.empty())));
+    List<Comparison.Missing> missing = comparison.differences().get(0).missing();
+    assertEquals("no iron", missing.get(0).reason());
+    assertEquals("no route to it there", missing.get(1).reason());
+  }
+
+  @Test
   void refusesToCompareNothing() {
     assertThrows(IllegalArgumentException.class, () -> new Comparison(List.of()));
   }

@@ -73,7 +73,7 @@ public final class SampleForecasts {
                 "decarboxylation-alpha-aryl",
                 "decarboxylation of an arylacetic acid",
                 "phenylacetic acid = toluene + carbon dioxide",
-                "O=C(O)Cc1ccccc1>>Cc1ccccc1.O=C=O",
+                "O=C(O)Cc1ccccc1 = c1ccc(cc1)C + O=C=O",
                 Optional.of(new Uncertain(-71.23, 3.4)),
                 List.of())));
   }
@@ -90,7 +90,7 @@ public final class SampleForecasts {
                 "ketonic-decarboxylation-self",
                 "ketonization of one acid",
                 "2 phenylacetic acid = 1,3-diphenylpropan-2-one + carbon dioxide + water",
-                "O=C(O)Cc1ccccc1.O=C(O)Cc1ccccc1>>O=C(Cc1ccccc1)Cc1ccccc1.O=C=O.O",
+                "2 O=C(O)Cc1ccccc1 = O=C(Cc1ccccc1)Cc2ccccc2 + O=C=O + O",
                 Optional.empty(),
                 List.of("oxide surface"))));
   }
