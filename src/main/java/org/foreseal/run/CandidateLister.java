@@ -64,7 +64,8 @@ final class CandidateLister {
   }
 
   /**
-   * Charged species score 1 as what is left of them; an ambient gas counts when a step makes it.
+   * Substrates score 1 as what is left of them; additives and ambient gases count when a step makes
+   * them.
    */
   private Optional<Scored> score(Species s) {
     if (s.depth() > 0) {
@@ -72,7 +73,7 @@ final class CandidateLister {
           .findFirst()
           .map(r -> new Scored(s, Optional.of(r), run.ranking().candidateScore(s.molecule(), r)));
     }
-    if (run.vessel().surroundings().charged().contains(s.molecule())) {
+    if (substrates.contains(s.molecule())) {
       return Optional.of(new Scored(s, Optional.empty(), 1));
     }
     return run.network().makersOf(s.id()).stream()
