@@ -1,8 +1,8 @@
 package org.foreseal.molecule;
 
 import java.util.Arrays;
-import java.util.List;
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 
 /**
  * The elements a molecule of this project can hold, with the neutral valences the valence check
@@ -38,7 +38,7 @@ public enum ChemicalElement {
   /** Iodine. */
   I(53, 126.9044719, 1);
 
-  private static final List<ChemicalElement> ALL = List.of(values());
+  private static final @Nullable ChemicalElement[] BY_NUMBER = byNumber();
 
   private final int atomicNumber;
   private final double monoisotopicMassDalton;
@@ -91,15 +91,26 @@ public enum ChemicalElement {
 
   /** The element with this atomic number, if this project knows it. */
   public static Optional<ChemicalElement> of(int atomicNumber) {
-    return ALL.stream().filter(e -> e.atomicNumber == atomicNumber).findFirst();
+    return atomicNumber >= 0 && atomicNumber < BY_NUMBER.length
+        ? Optional.ofNullable(BY_NUMBER[atomicNumber])
+        : Optional.empty();
   }
 
   /** The element with this atomic number, which must be one of this enumeration. */
   public static ChemicalElement require(int atomicNumber) {
-    return of(atomicNumber)
-        .orElseThrow(
-            () ->
-                new IllegalArgumentException(
-                    "no such element here: atomic number " + atomicNumber));
+    ChemicalElement element =
+        atomicNumber >= 0 && atomicNumber < BY_NUMBER.length ? BY_NUMBER[atomicNumber] : null;
+    if (element == null) {
+      throw new IllegalArgumentException("no such element here: atomic number " + atomicNumber);
+    }
+    return element;
+  }
+
+  private static @Nullable ChemicalElement[] byNumber() {
+    @Nullable ChemicalElement[] table = new ChemicalElement[I.atomicNumber + 1];
+    for (ChemicalElement e : values()) {
+      table[e.atomicNumber] = e;
+    }
+    return table;
   }
 }

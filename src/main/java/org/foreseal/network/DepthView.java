@@ -1,9 +1,11 @@
 package org.foreseal.network;
 
+import java.util.BitSet;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 import org.foreseal.molecule.Molecule;
+import org.foreseal.rule.AmbientSpecies;
 
 /**
  * The state of the network that all rules see while one depth is expanded.
@@ -17,6 +19,7 @@ final class DepthView {
   private final Map<Molecule, Integer> ids;
   private final StepPruner pruner;
   private final long deadline;
+  private final BitSet ambient = new BitSet();
   private final Map<Molecule, Molecule> fresh = new ConcurrentHashMap<>();
 
   DepthView(
@@ -30,6 +33,9 @@ final class DepthView {
     this.ids = ids;
     this.pruner = pruner;
     this.deadline = deadline;
+    species.stream()
+        .filter(s -> AmbientSpecies.includes(s.molecule()))
+        .forEach(s -> ambient.set(s.id()));
   }
 
   int size() {
@@ -43,6 +49,11 @@ final class DepthView {
 
   Species species(int id) {
     return species.get(id);
+  }
+
+  /** Whether this is one of the small molecules that are always about. */
+  boolean isAmbient(int id) {
+    return ambient.get(id);
   }
 
   StepPruner pruner() {

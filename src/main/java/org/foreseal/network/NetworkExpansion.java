@@ -7,6 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.concurrent.Callable;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -107,7 +108,7 @@ public final class NetworkExpansion {
       }
       List<Species> frozen = List.copyOf(species);
       DepthView view = new DepthView(frozen, from, ids, pruner, deadline);
-      List<RuleTask.Found> results = runAll(tasks, view, pool);
+      List<List<Found>> results = runAll(tasks, view, pool);
       boolean outOfTime = mergeAll(results, depth + 1);
       progress.accept(species.size());
       if (outOfTime || speciesLimitReached) {
@@ -116,9 +117,6 @@ public final class NetworkExpansion {
                 ? "wall time " + limits.wallTime().toSeconds() + " s"
                 : limits.species() + " species";
         return finished(depth + 1, new Network.Ending("limit: " + limit, true));
-      }
-      if (results.stream().anyMatch(RuleTask.Found::isOverBudget)) {
-        overBudget = true;
       }
       from = to;
     }
@@ -135,35 +133,56 @@ public final class NetworkExpansion {
     return new Network(species, steps, open, depth, ending);
   }
 
-  private static List<RuleTask.Found> runAll(
+  /** For every rule what its slices found, in order. */
+  private static List<List<Found>> runAll(
       List<RuleTask> tasks, DepthView view, ExecutorService pool) {
-    List<Future<RuleTask.Found>> futures = new ArrayList<>();
-    for (RuleTask task : tasks) {
-      futures.add(pool.submit(() -> task.run(view)));
-    }
-    List<RuleTask.Found> results = new ArrayList<>();
     try {
-      for (Future<RuleTask.Found> future : futures) {
-        results.add(future.get());
+      List<Callable<Boolean>> scans = new ArrayList<>();
+      tasks.forEach(task -> scans.add(() -> scanned(task, view)));
+      for (Future<Boolean> scan : pool.invokeAll(scans)) {
+        scan.get();
       }
+      List<List<Future<Found>>> futures = new ArrayList<>();
+      for (RuleTask task : tasks) {
+        futures.add(task.slices(view).stream().map(pool::submit).toList());
+      }
+      List<List<Found>> results = new ArrayList<>();
+      for (List<Future<Found>> slices : futures) {
+        List<Found> found = new ArrayList<>();
+        for (Future<Found> slice : slices) {
+          found.add(slice.get());
+        }
+        results.add(found);
+      }
+      return results;
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
       throw new IllegalStateException("interrupted while the network grew", e);
     } catch (ExecutionException e) {
       throw new IllegalStateException("a rule failed while the network grew", e.getCause());
     }
-    return results;
+  }
+
+  private static boolean scanned(RuleTask task, DepthView view) {
+    task.scan(view);
+    return true;
   }
 
   /** Numbers species and steps in the order of the rules; answers whether the time ran out. */
-  private boolean mergeAll(List<RuleTask.Found> results, int depth) {
-    for (RuleTask.Found found : results) {
-      found.refusals().forEach(this::remember);
-      for (Proposal proposal : found.proposals()) {
-        merge(proposal, depth);
-      }
-      if (found.isOutOfTime()) {
-        return true;
+  private boolean mergeAll(List<List<Found>> results, int depth) {
+    for (List<Found> slices : results) {
+      int tried = 0;
+      for (Found found : slices) {
+        if (tried > limits.pairsPerRule()) {
+          overBudget = true;
+          break;
+        }
+        tried += found.tried();
+        found.refusals().forEach(this::remember);
+        found.proposals().forEach(proposal -> merge(proposal, depth));
+        if (found.isOutOfTime()) {
+          return true;
+        }
       }
     }
     return false;

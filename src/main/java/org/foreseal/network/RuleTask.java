@@ -6,83 +6,43 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import org.foreseal.molecule.ChemicalElement;
+import java.util.concurrent.Callable;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.Outcome;
 import org.foreseal.molecule.Transformation;
-import org.foreseal.rule.AmbientSpecies;
-import org.foreseal.rule.Guard;
 import org.foreseal.rule.NearMiss;
 import org.foreseal.rule.Rule;
 import org.foreseal.rule.RuleLibrary;
-import org.foreseal.rule.SpeciesLimit;
 import org.foreseal.rule.Surroundings;
 
 /**
  * One rule at work. It keeps, for each of its reactant pieces, the species that hold a site for it,
- * and combines only those; a rule whose needs are not met is tried on the charge alone, so that the
- * reader learns what is missing.
+ * and combines only those, in slices that can run at the same time; a rule that the run closes is
+ * tried on the charge alone, so that the reader learns what is missing.
  */
 final class RuleTask {
+  private static final int SLICE = 64;
+
   private final Rule rule;
-  private final Surroundings surroundings;
   private final Limits limits;
-  private final RuleLibrary library;
-  private final Optional<String> closed;
+  private final StepJudge judge;
   private final List<List<Integer>> candidates = new ArrayList<>();
   private int scanned;
 
   RuleTask(Rule rule, Surroundings surroundings, Limits limits, RuleLibrary library) {
     this.rule = rule;
-    this.surroundings = surroundings;
     this.limits = limits;
-    this.library = library;
-    closed = rule.closedBecause(surroundings);
+    judge = new StepJudge(rule, surroundings, limits, library.speciesLimits());
     for (int i = 0; i < rule.transformation().reactantCount(); i++) {
       candidates.add(new ArrayList<>());
     }
   }
 
-  /** What one rule found at one depth. */
-  static final class Found {
-    private final List<Proposal> proposals = new ArrayList<>();
-    private final List<Refusal> refusals = new ArrayList<>();
-    private int tried;
-    private boolean overBudget;
-    private boolean outOfTime;
-
-    List<Proposal> proposals() {
-      return proposals;
+  /** Looks through the species added since the last call for sites of this rule. */
+  void scan(DepthView view) {
+    if (judge.isClosed() && scanned > 0) {
+      return;
     }
-
-    List<Refusal> refusals() {
-      return refusals;
-    }
-
-    boolean isOverBudget() {
-      return overBudget;
-    }
-
-    boolean isOutOfTime() {
-      return outOfTime;
-    }
-  }
-
-  Found run(DepthView view) {
-    Found found = new Found();
-    boolean first = scanned == 0;
-    if (closed.isPresent() && !first) {
-      return found;
-    }
-    scan(view);
-    combine(view, 0, new int[candidates.size()], false, found);
-    if (first) {
-      rule.nearMisses().forEach(miss -> tryNearMiss(view, miss, found));
-    }
-    return found;
-  }
-
-  private void scan(DepthView view) {
     for (int id = scanned; id < view.size(); id++) {
       Molecule m = view.species(id).molecule();
       for (int piece = 0; piece < candidates.size(); piece++) {
@@ -94,57 +54,81 @@ final class RuleTask {
     scanned = view.size();
   }
 
+  /** The work of this depth, in slices over the species for the first piece. */
+  List<Callable<Found>> slices(DepthView view) {
+    List<Callable<Found>> slices = new ArrayList<>();
+    boolean first = view.firstNew() == 0;
+    if (judge.isClosed() && !first) {
+      return slices;
+    }
+    List<Integer> heads = candidates.get(0);
+    for (int from = 0; from < heads.size(); from += SLICE) {
+      List<Integer> slice = heads.subList(from, Math.min(from + SLICE, heads.size()));
+      slices.add(() -> run(view, slice));
+    }
+    if (first && !rule.nearMisses().isEmpty()) {
+      slices.add(() -> nearMisses(view));
+    }
+    return slices;
+  }
+
+  private Found run(DepthView view, List<Integer> heads) {
+    Found found = new Found();
+    int[] chosen = new int[candidates.size()];
+    for (int head : heads) {
+      boolean isNew = head >= view.firstNew();
+      if (isNew || chosen.length > 1) {
+        chosen[0] = head;
+        combine(view, 1, chosen, isNew, found);
+      }
+    }
+    return found;
+  }
+
   /** All combinations that hold at least one species of the last depth. */
   private void combine(DepthView view, int piece, int[] chosen, boolean holdsNew, Found found) {
-    if (found.overBudget || found.outOfTime) {
+    if (found.isOutOfTime() || found.tried() > limits.pairsPerRule()) {
       return;
     }
     if (piece == chosen.length) {
-      if (holdsNew) {
-        attempt(view, chosen.clone(), found);
-      }
+      attempt(view, chosen.clone(), found);
       return;
     }
-    boolean last = piece == chosen.length - 1;
-    for (int id : candidates.get(piece)) {
-      boolean isNew = id >= view.firstNew();
-      if (last && !holdsNew && !isNew) {
-        continue;
-      }
-      chosen[piece] = id;
-      if (meets(view, chosen, piece)) {
-        combine(view, piece + 1, chosen, holdsNew || isNew, found);
+    List<Integer> options = candidates.get(piece);
+    boolean mustBeNew = piece == chosen.length - 1 && !holdsNew;
+    int deepest = deepestPartner(view, chosen, piece);
+    for (int i = mustBeNew ? firstNewIn(options, view) : 0; i < options.size(); i++) {
+      int id = options.get(i);
+      if (view.species(id).depth() <= deepest || view.isAmbient(id)) {
+        chosen[piece] = id;
+        combine(view, piece + 1, chosen, holdsNew || id >= view.firstNew(), found);
       }
     }
   }
 
-  /** Whether the last chosen species can meet those chosen before it. */
-  private static boolean meets(DepthView view, int[] chosen, int piece) {
-    Species now = view.species(chosen[piece]);
+  private static int firstNewIn(List<Integer> options, DepthView view) {
+    int at = java.util.Collections.binarySearch(options, view.firstNew());
+    return at >= 0 ? at : -at - 1;
+  }
+
+  /**
+   * How many steps from the charge a further partner may be: any number when those chosen are part
+   * of the charge or ambient, one when they are one step away, none when they are further.
+   */
+  private static int deepestPartner(DepthView view, int[] chosen, int piece) {
+    int deepest = Integer.MAX_VALUE;
     for (int i = 0; i < piece; i++) {
-      Species earlier = view.species(chosen[i]);
-      boolean oneIsCharged = now.depth() == 0 || earlier.depth() == 0;
-      if (!oneIsCharged
-          && Math.max(now.depth(), earlier.depth()) > 1
-          && !isAmbient(now)
-          && !isAmbient(earlier)) {
-        return false;
+      int depth = view.isAmbient(chosen[i]) ? 0 : view.species(chosen[i]).depth();
+      if (depth > 0) {
+        deepest = Math.min(deepest, depth == 1 ? 1 : 0);
       }
     }
-    return true;
-  }
-
-  private static boolean isAmbient(Species s) {
-    return AmbientSpecies.includes(s.molecule());
+    return deepest;
   }
 
   private void attempt(DepthView view, int[] chosen, Found found) {
-    if (++found.tried > limits.pairsPerRule()) {
-      found.overBudget = true;
-      return;
-    }
-    if ((found.tried & 63) == 0 && view.isOutOfTime()) {
-      found.outOfTime = true;
+    if ((found.countTry() & 63) == 0 && view.isOutOfTime()) {
+      found.endForTime();
       return;
     }
     List<Molecule> reactants =
@@ -167,14 +151,13 @@ final class RuleTask {
     int partners = 0;
     int deepest = 0;
     for (int id : chosen) {
-      Species s = view.species(id);
-      if (!isAmbient(s)) {
+      if (!view.isAmbient(id)) {
         partners++;
-        deepest = Math.max(deepest, s.depth());
+        deepest = Math.max(deepest, view.species(id).depth());
       }
     }
     boolean near = deepest == 0 || (partners == 1 && deepest == 1);
-    return near || !rule.refusesReactants(reactants, surroundings);
+    return near || !judge.refusesReactants(reactants);
   }
 
   private static Outcome shared(DepthView view, Outcome outcome) {
@@ -187,85 +170,37 @@ final class RuleTask {
     if (isNoChange(reactants, proposal.products())) {
       return;
     }
-    Optional<Refusal> refusal = refusal(view, reactants, proposal.products(), depth);
-    if (refusal.isPresent()) {
-      found.refusals.add(refusal.get());
-    } else {
-      found.proposals.add(proposal);
-    }
+    Optional<Refusal> refusal = judge.refusal(view.pruner(), reactants, proposal.products(), depth);
+    refusal.ifPresentOrElse(found::add, () -> found.add(proposal));
   }
 
   private static boolean isNoChange(List<Molecule> reactants, List<Molecule> products) {
-    return reactants.stream().sorted().toList().equals(products.stream().sorted().toList());
-  }
-
-  private Optional<Refusal> refusal(
-      DepthView view, List<Molecule> reactants, List<Molecule> products, int depth) {
-    if (closed.isPresent()) {
-      return Optional.of(refused(reactants, products, Refusal.Kind.NEED, closed.get(), "", depth));
-    }
-    Optional<Guard> guard = rule.refusedBy(new Guard.Attempt(reactants, products, surroundings));
-    if (guard.isPresent()) {
-      return Optional.of(
-          refused(reactants, products, Refusal.Kind.GUARD, guard.get().reason(), "", depth));
-    }
-    for (SpeciesLimit limit : library.speciesLimits()) {
-      for (Molecule p : products) {
-        if (limit.pattern().isIn(p)) {
-          return Optional.of(
-              refused(reactants, products, Refusal.Kind.GUARD, limit.reason(), "", depth));
-        }
-      }
-    }
-    Optional<String> size = tooLarge(products);
-    if (size.isPresent()) {
-      return Optional.of(refused(reactants, products, Refusal.Kind.LIMIT, size.get(), "", depth));
-    }
-    if (view.pruner().judge(reactants, products) instanceof Verdict.Pruned p) {
-      return Optional.of(
-          refused(reactants, products, Refusal.Kind.GIBBS, p.reason(), p.detail(), depth));
-    }
-    return Optional.empty();
-  }
-
-  private Optional<String> tooLarge(List<Molecule> products) {
-    for (Molecule p : products) {
-      if (p.heavyAtomCount() > limits.heavyAtoms()) {
-        return Optional.of("larger than " + limits.heavyAtoms() + " heavy atoms");
-      }
-      if (p.formula().count(ChemicalElement.C) > limits.carbons()) {
-        return Optional.of("larger than " + limits.carbons() + " carbon atoms");
-      }
-    }
-    return Optional.empty();
-  }
-
-  private Refusal refused(
-      List<Molecule> reactants,
-      List<Molecule> products,
-      Refusal.Kind kind,
-      String reason,
-      String detail,
-      int depth) {
-    return new Refusal(rule, reactants, products, kind, reason, detail, depth);
+    return reactants.size() == products.size()
+        && reactants.stream().sorted().toList().equals(products.stream().sorted().toList());
   }
 
   /** Near misses are looked for among the charge only: they explain what will not be seen. */
-  private void tryNearMiss(DepthView view, NearMiss miss, Found found) {
-    Transformation t = miss.transformation();
+  private Found nearMisses(DepthView view) {
+    Found found = new Found();
     List<Molecule> charge = new ArrayList<>();
     for (int id = 0; id < view.size(); id++) {
       charge.add(view.species(id).molecule());
     }
+    for (NearMiss miss : rule.nearMisses()) {
+      tryNearMiss(miss, charge, found);
+    }
+    return found;
+  }
+
+  private void tryNearMiss(NearMiss miss, List<Molecule> charge, Found found) {
+    Transformation t = miss.transformation();
     Set<List<Molecule>> tried = new HashSet<>();
     for (Molecule a : charge) {
       for (Molecule b : t.reactantCount() == 1 ? List.of(a) : charge) {
         List<Molecule> reactants = t.reactantCount() == 1 ? List.of(a) : List.of(a, b);
         if (rule.pairs(reactants) && tried.add(reactants)) {
-          for (Outcome o : t.apply(reactants)) {
-            found.refusals.add(
-                refused(reactants, o.products(), Refusal.Kind.NEAR_MISS, miss.reason(), "", 1));
-          }
+          t.apply(reactants)
+              .forEach(o -> found.add(judge.nearMiss(reactants, o.products(), miss.reason())));
         }
       }
     }

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
+import java.util.stream.IntStream;
 import org.foreseal.chromatography.WorkUp;
 import org.foreseal.molecule.ChemicalElement;
 import org.foreseal.molecule.Molecule;
@@ -23,6 +24,14 @@ final class CandidateLister {
   private static final int ROUTES_EACH = 3;
   private static final double SCORE_FLOOR = 1e-3;
 
+  /** Here the usual list ends, whatever the score; the whole list is there on request. */
+  private static final int MOST_LISTED = 1000;
+
+  /**
+   * In longer lists every candidate shows its best route only; the search for others takes time.
+   */
+  private static final int LISTED_WITH_OTHER_ROUTES = 400;
+
   private final RunNetwork run;
   private final Function<Molecule, String> names;
   private final Set<Molecule> substrates;
@@ -37,8 +46,8 @@ final class CandidateLister {
   private record Scored(Species species, Optional<Route> best, double score) {}
 
   /**
-   * Every species above the floor, or every one at all, best first; the solvent and unused gases
-   * are left out.
+   * The best species above the floor, or every one at all, best first, substrates before products;
+   * the solvent and unused gases are left out.
    */
   List<Candidate> list(boolean everything) {
     List<Scored> scored = new ArrayList<>();
@@ -51,12 +60,14 @@ final class CandidateLister {
         Comparator.comparing((Scored c) -> !isSubstrate(c))
             .thenComparing(c -> -c.score())
             .thenComparing(c -> c.species().molecule()));
-    List<Candidate> candidates = new ArrayList<>();
-    int rank = 0;
-    for (Scored c : scored) {
-      candidates.add(candidate(c, isSubstrate(c) ? 0 : ++rank));
-    }
-    return candidates;
+    List<Scored> listed =
+        everything ? scored : scored.subList(0, Math.min(MOST_LISTED, scored.size()));
+    int routesEach = listed.size() <= LISTED_WITH_OTHER_ROUTES ? ROUTES_EACH : 1;
+    int charged = (int) listed.stream().filter(this::isSubstrate).count();
+    return IntStream.range(0, listed.size())
+        .parallel()
+        .mapToObj(i -> candidate(listed.get(i), Math.max(0, i + 1 - charged), routesEach))
+        .toList();
   }
 
   private boolean isSubstrate(Scored c) {
@@ -69,8 +80,8 @@ final class CandidateLister {
    */
   private Optional<Scored> score(Species s) {
     if (s.depth() > 0) {
-      return run.routes().routesTo(s.id(), 1).stream()
-          .findFirst()
+      return run.routes()
+          .cheapestRoute(s.id())
           .map(r -> new Scored(s, Optional.of(r), run.ranking().candidateScore(s.molecule(), r)));
     }
     if (substrates.contains(s.molecule())) {
@@ -85,10 +96,10 @@ final class CandidateLister {
         .map(best -> new Scored(s, Optional.empty(), best));
   }
 
-  private Candidate candidate(Scored c, int rank) {
+  private Candidate candidate(Scored c, int rank, int routesEach) {
     Molecule m = c.species().molecule();
     List<ForecastRoute> routes =
-        c.best().isPresent() ? routes(c.species().id(), ROUTES_EACH) : List.of();
+        c.best().map(best -> routes(c.species().id(), best, routesEach)).orElse(List.of());
     return new Candidate(
         rank,
         names.apply(m),
@@ -110,8 +121,24 @@ final class CandidateLister {
         && !m.equals(AmbientSpecies.CARBON_MONOXIDE);
   }
 
+  /** The best route, then others that differ from it, cheapest first. */
   List<ForecastRoute> routes(int species, int most) {
-    return run.routes().routesTo(species, most).stream()
+    return run.routes()
+        .cheapestRoute(species)
+        .map(best -> routes(species, best, most))
+        .orElse(List.of());
+  }
+
+  private List<ForecastRoute> routes(int species, Route best, int most) {
+    List<Route> routes = new ArrayList<>(List.of(best));
+    if (most > 1) {
+      run.routes().routesTo(species, most).stream()
+          .filter(r -> !r.steps().equals(best.steps()))
+          .limit(most - 1L)
+          .forEach(routes::add);
+    }
+    routes.sort(Comparator.comparingDouble(Route::cost));
+    return routes.stream()
         .map(
             r ->
                 new ForecastRoute(Math.exp(-r.cost()), r.steps().stream().map(this::step).toList()))

@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Function;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.network.NetworkDrawing;
@@ -21,6 +22,7 @@ import org.foreseal.rule.RuleLibrary;
 /** The pipeline: run sheet to network to ranked candidates. */
 public final class Forecaster implements Engine {
   private static final int ROUTES_DRAWN = 5;
+  private static final int MOST_RULED_OUT = 500;
   private static final String GAS_PHASE_NOTE =
       "gas-phase Gibbs energies at 1 bar; what water does to them is not in these figures";
   private static final String SCORE_NOTE =
@@ -31,9 +33,15 @@ public final class Forecaster implements Engine {
   private final EnergySource energySource;
 
   Forecaster(Function<Molecule, String> names, String version, EnergySource energySource) {
-    this.names = names;
+    this.names = remembering(names);
     this.version = version;
     this.energySource = energySource;
+  }
+
+  /** Names turn up in many equations; each is made once. */
+  private static Function<Molecule, String> remembering(Function<Molecule, String> names) {
+    Map<Molecule, String> known = new ConcurrentHashMap<>();
+    return molecule -> known.computeIfAbsent(molecule, names);
   }
 
   /** The forecaster with the Gibbs energies of this build. */
@@ -50,7 +58,8 @@ public final class Forecaster implements Engine {
         sheet,
         notes(sheet, run),
         new CandidateLister(run, sheet, names).list(options.everything()),
-        RefusalLister.list(run.network(), names),
+        RefusalLister.list(
+            run.network(), options.everything() ? Integer.MAX_VALUE : MOST_RULED_OUT, names),
         run.summary());
   }
 
@@ -96,7 +105,7 @@ public final class Forecaster implements Engine {
     if (species.isPresent()) {
       return "it is part of the charge";
     }
-    return RefusalLister.list(run.network(), names).stream()
+    return RefusalLister.list(run.network(), Integer.MAX_VALUE, names).stream()
         .filter(r -> r.smiles().equals(product.smiles()))
         .map(
             r ->

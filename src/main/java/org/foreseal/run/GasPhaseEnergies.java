@@ -2,6 +2,7 @@ package org.foreseal.run;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.quantity.Uncertain;
 import org.foreseal.thermo.GasPhase;
@@ -26,5 +27,14 @@ final class GasPhaseEnergies implements StepEnergies {
     return GasPhase.covers(temperatureKelvin)
         ? session.stepGibbs(reactants, products, temperatureKelvin).value()
         : Optional.empty();
+  }
+
+  @Override
+  public OptionalDouble deltaGibbsValue(List<Molecule> reactants, List<Molecule> products) {
+    return GasPhase.covers(temperatureKelvin)
+        ? session.stepGibbsValue(reactants, products, temperatureKelvin).value().stream()
+            .mapToDouble(Double::doubleValue)
+            .findFirst()
+        : OptionalDouble.empty();
   }
 }

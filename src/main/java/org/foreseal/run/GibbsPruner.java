@@ -2,7 +2,7 @@ package org.foreseal.run;
 
 import java.util.List;
 import java.util.Locale;
-import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.Set;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.network.StepPruner;
@@ -46,12 +46,12 @@ final class GibbsPruner implements StepPruner {
 
   @Override
   public Verdict judge(List<Molecule> reactants, List<Molecule> products) {
-    Optional<Uncertain> gibbs = energies.deltaGibbs(reactants, products);
-    if (gibbs.isEmpty()) {
+    double margin = marginKilojoules(reactants, products);
+    OptionalDouble value = energies.deltaGibbsValue(reactants, products);
+    if (value.isEmpty() || value.getAsDouble() <= margin) {
       return Verdict.KEPT;
     }
-    double margin = marginKilojoules(reactants, products);
-    Uncertain g = gibbs.get();
+    Uncertain g = energies.deltaGibbs(reactants, products).orElseThrow();
     if (g.value() - SAFETY_DEVIATIONS * g.standardDeviation() <= margin) {
       return Verdict.KEPT;
     }

@@ -31,13 +31,14 @@ final class RefusalLister {
     };
   }
 
-  static List<RuledOut> list(Network network, Function<Molecule, String> names) {
+  static List<RuledOut> list(Network network, int most, Function<Molecule, String> names) {
     List<Refusal> sorted = new ArrayList<>(network.refusals());
     sorted.sort(BY_CLARITY);
     Map<Molecule, RuledOut> byProduct = new LinkedHashMap<>();
     for (Refusal refusal : sorted) {
       for (Molecule product : refusal.products()) {
-        if (isWorthNaming(product)
+        if (byProduct.size() < most
+            && isWorthNaming(product)
             && network.find(product).isEmpty()
             && !byProduct.containsKey(product)) {
           byProduct.put(product, ruledOut(refusal, product, names));

@@ -2,6 +2,7 @@ package org.foreseal.run;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.foreseal.molecule.Molecule;
 import org.foreseal.quantity.Uncertain;
 
@@ -10,4 +11,9 @@ import org.foreseal.quantity.Uncertain;
 interface StepEnergies {
   /** Standard Gibbs energy of a balanced step, kJ/mol, or nothing where it cannot be estimated. */
   Optional<Uncertain> deltaGibbs(List<Molecule> reactants, List<Molecule> products);
+
+  /** The value alone, for a first look; quicker where the error takes time. */
+  default OptionalDouble deltaGibbsValue(List<Molecule> reactants, List<Molecule> products) {
+    return deltaGibbs(reactants, products).stream().mapToDouble(Uncertain::value).findFirst();
+  }
 }
