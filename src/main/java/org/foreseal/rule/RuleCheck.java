@@ -10,6 +10,7 @@ import org.foreseal.molecule.Pattern;
 import org.foreseal.molecule.Smiles;
 import org.foreseal.molecule.Transformation;
 import org.foreseal.quantity.BadInputException;
+import org.foreseal.quantity.Place;
 
 /**
  * Runs the self-tests that rules carry: examples give their products, counter-examples give
@@ -25,10 +26,10 @@ public final class RuleCheck {
    * One failed self-test.
    *
    * @param rule rule id or limit id
-   * @param where file and line
+   * @param place file and line
    * @param problem what is wrong
    */
-  public record Failure(String rule, String where, String problem) {}
+  public record Failure(String rule, Place place, String problem) {}
 
   /**
    * All failures of a library; {@code known} are ids that its rules may refer to besides its own.
@@ -39,12 +40,12 @@ public final class RuleCheck {
     library.rules().forEach(r -> ids.add(r.id()));
     for (Rule rule : library.rules()) {
       for (String problem : problems(rule, ids)) {
-        failures.add(new Failure(rule.id(), rule.place().label(), problem));
+        failures.add(new Failure(rule.id(), rule.place(), problem));
       }
     }
     for (SpeciesLimit limit : library.speciesLimits()) {
       for (String problem : problems(limit)) {
-        failures.add(new Failure(limit.id(), "species-limits", problem));
+        failures.add(new Failure(limit.id(), limit.place(), problem));
       }
     }
     return failures;

@@ -225,6 +225,7 @@ final class RuleReader {
         n.require("reason").text(),
         compiled(n.require("holds"), Pattern::of),
         texts(n.require("refuses")),
-        texts(n.require("accepts")));
+        texts(n.require("accepts")),
+        n.place());
   }
 }

@@ -174,7 +174,7 @@ public final class Forecaster implements Engine {
     Set<String> known = new LinkedHashSet<>(builtIn.rules().stream().map(Rule::id).toList());
     List<RuleCheck.Fault> faults =
         org.foreseal.rule.RuleCheck.run(library, known).stream()
-            .map(f -> new RuleCheck.Fault(f.where(), f.rule(), f.problem()))
+            .map(f -> new RuleCheck.Fault(f.place().label(), f.rule(), f.problem()))
             .toList();
     return new RuleCheck(
         library.rules().size(), org.foreseal.rule.RuleCheck.count(library), faults);

@@ -5,10 +5,14 @@ import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.foreseal.network.Limits;
 import org.foreseal.network.Network;
 import org.foreseal.network.NetworkExpansion;
 import org.foreseal.network.RouteFinder;
+import org.foreseal.quantity.BadInputException;
+import org.foreseal.rule.Rule;
 import org.foreseal.rule.RuleLibrary;
 
 /**
@@ -58,7 +62,22 @@ record RunNetwork(
   /** The built-in rules, with those of the user's folder added. */
   static RuleLibrary library(Optional<Path> folder) {
     RuleLibrary builtIn = RuleLibrary.builtIn();
-    return folder.map(path -> builtIn.with(own(path))).orElse(builtIn);
+    return folder.map(path -> builtIn.with(checked(own(path), builtIn))).orElse(builtIn);
+  }
+
+  /** A user's rules take part only when they pass their own self-tests. */
+  private static RuleLibrary checked(RuleLibrary own, RuleLibrary builtIn) {
+    Set<String> known = builtIn.rules().stream().map(Rule::id).collect(Collectors.toSet());
+    org.foreseal.rule.RuleCheck.run(own, known).stream()
+        .findFirst()
+        .ifPresent(
+            f -> {
+              throw new BadInputException(
+                  f.place(),
+                  "rule '" + f.rule() + "' fails its own self-test: " + f.problem(),
+                  "mend the rule or its example; 'foreseal rules check DIR' lists every fault");
+            });
+    return own;
   }
 
   static RuleLibrary own(Path folder) {

@@ -2,6 +2,7 @@ package org.foreseal.run;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
@@ -18,6 +19,7 @@ import org.foreseal.molecule.Molecule;
 import org.foreseal.molecule.MoleculeNames;
 import org.foreseal.molecule.MoleculeReader;
 import org.foreseal.molecule.Smiles;
+import org.foreseal.quantity.BadInputException;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -46,6 +48,22 @@ class ForecasterTest {
         - {name: SOLID, milligrams: 50}
       temperature_C: 300
       """;
+
+  private static final String OWN_RULE =
+      """
+        family: own
+        rules:
+          - id: own-exchange
+            title: acid to thioacid
+            smirks: "[C:1](=[O:2])[O:3][H:4].[H:5][S:6][H:7]>>[C:1](=[O:2])[S:6][H:5].[H:4][O:3][H:7]"
+            applies-to: any acid
+            needs: [[]]
+            helped-by: []
+            window-C: [100, 400]
+            prominence: 1
+            sources: [{key: common-practice}]
+            examples: [{from: ["CC(=O)O", "S"], to: ["CC(=O)S", "O"]}]
+        """;
 
   private static Optional<Candidate> find(Forecast forecast, String smiles) {
     Molecule wanted = Smiles.read(smiles);
@@ -230,22 +248,7 @@ class ForecasterTest {
 
   @Test
   void ownRulesTakePart(@TempDir Path folder) throws IOException {
-    Files.writeString(
-        folder.resolve("own.yaml"),
-        """
-        family: own
-        rules:
-          - id: own-exchange
-            title: acid to thioacid
-            smirks: "[C:1](=[O:2])[O:3][H:4].[H:5][S:6][H:7]>>[C:1](=[O:2])[S:6][H:5].[H:4][O:3][H:7]"
-            applies-to: any acid
-            needs: [[]]
-            helped-by: []
-            window-C: [100, 400]
-            prominence: 1
-            sources: [{key: common-practice}]
-            examples: [{from: ["CC(=O)O", "S"], to: ["CC(=O)S", "O"]}]
-        """);
+    Files.writeString(folder.resolve("own.yaml"), OWN_RULE);
     RunSheet sheet = sheet(PHENYLACETIC.replace("SOLID", "pyrite"));
     ForecastOptions own =
         new ForecastOptions(false, Optional.of(folder), OptionalInt.empty(), Optional.empty());
@@ -255,6 +258,18 @@ class ForecasterTest {
     assertTrue(
         FORECASTER.rules(Optional.of(folder)).stream()
             .anyMatch(r -> r.id().equals("own-exchange")));
+  }
+
+  @Test
+  void ownRulesThatFailTheirExampleAreRefused(@TempDir Path folder) throws IOException {
+    Files.writeString(folder.resolve("own.yaml"), OWN_RULE.replace("CC(=O)S", "CCS"));
+    ForecastOptions own =
+        new ForecastOptions(false, Optional.of(folder), OptionalInt.empty(), Optional.empty());
+    RunSheet sheet = sheet(PHENYLACETIC.replace("SOLID", "pyrite"));
+    BadInputException e =
+        assertThrows(
+            BadInputException.class, () -> FORECASTER.forecast(sheet, own, Progress.SILENT));
+    assertTrue(e.report().contains("own.yaml:3") && e.report().contains("should give"), e::report);
   }
 
   @Test
