@@ -9,7 +9,7 @@ import org.foreseal.quantity.BadInputException;
 import org.foreseal.quantity.Place;
 import org.foreseal.report.RulesWriter;
 import org.foreseal.run.Nearest;
-import org.foreseal.run.RuleCheck;
+import org.foreseal.run.RuleCheckReport;
 import org.foreseal.run.RuleSummary;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
@@ -137,7 +137,7 @@ final class RulesCommand implements Callable<Integer> {
   private int check(Console console) throws IOException {
     Optional<Path> checked =
         Optional.ofNullable(argument).map(Path::of).or(() -> Optional.ofNullable(folder));
-    RuleCheck result = session.engine().get().checkRules(checked);
+    RuleCheckReport result = session.engine().get().checkRules(checked);
     console.result(
         switch (format) {
           case TEXT -> RulesWriter.checkText(result);

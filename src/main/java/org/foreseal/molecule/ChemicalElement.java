@@ -1,6 +1,7 @@
 package org.foreseal.molecule;
 
 import java.util.Arrays;
+import java.util.Locale;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 
@@ -64,7 +65,7 @@ public enum ChemicalElement {
   public String symbol() {
     return name().length() == 1
         ? name()
-        : name().charAt(0) + name().substring(1).toLowerCase(java.util.Locale.ROOT);
+        : name().charAt(0) + name().substring(1).toLowerCase(Locale.ROOT);
   }
 
   /** True for the elements an input molecule may hold: C H N O S P F Cl Br I. */

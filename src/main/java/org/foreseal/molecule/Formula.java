@@ -1,5 +1,7 @@
 package org.foreseal.molecule;
 
+import java.util.Collections;
+import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.Map;
 
@@ -13,7 +15,7 @@ import java.util.Map;
 public record Formula(Map<ChemicalElement, Integer> counts, int charge) {
   /** Keeps an unmodifiable copy. */
   public Formula {
-    counts = java.util.Collections.unmodifiableMap(new EnumMap<>(counts));
+    counts = Collections.unmodifiableMap(new EnumMap<>(counts));
   }
 
   static Formula of(Molecule molecule) {
@@ -52,7 +54,7 @@ public record Formula(Map<ChemicalElement, Integer> counts, int charge) {
     }
     counts.keySet().stream()
         .filter(e -> !organic || (e != ChemicalElement.C && e != ChemicalElement.H))
-        .sorted(java.util.Comparator.comparing(ChemicalElement::symbol))
+        .sorted(Comparator.comparing(ChemicalElement::symbol))
         .forEach(e -> append(text, e));
     if (charge != 0) {
       text.append(charge > 0 ? "+" : "-")

@@ -1,6 +1,7 @@
 package org.foreseal.molecule;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -41,7 +42,7 @@ final class PlanarRings {
     int size = length + 1;
     for (int next : ringNeighbours[atom]) {
       if (next == path[0] && size >= SMALLEST && path[1] < atom && !hasChord(size)) {
-        found.add(java.util.Arrays.copyOf(path, size));
+        found.add(Arrays.copyOf(path, size));
       } else if (size < LARGEST && next > path[0] && allowed[next] && !onPath[next]) {
         extend(next, size);
       }

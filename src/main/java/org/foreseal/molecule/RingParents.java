@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.TreeSet;
 import org.foreseal.quantity.CsvTable;
+import org.foreseal.quantity.Place;
 
 /**
  * The ring parents of {@code names/ring-parents.csv} and the plain carbocycles, and where a
@@ -33,8 +34,7 @@ final class RingParents {
   private static RingParent parent(String name, String smiles, String[] locants, boolean fixed) {
     try {
       Fragment fragment =
-          CdkBridge.fromLibrary(
-                  Smiles.parse(smiles, org.foreseal.quantity.Place.onCommandLine(smiles, 1)))
+          CdkBridge.fromLibrary(Smiles.parse(smiles, Place.onCommandLine(smiles, 1)))
               .build()
               .get(0);
       Integer[] order = new Integer[locants.length];

@@ -1,6 +1,7 @@
 package org.foreseal.network;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -88,6 +89,6 @@ public final class Network {
 
   /** The steps that form this species. */
   public List<Step> makersOf(int speciesId) {
-    return java.util.Collections.unmodifiableList(makers.get(speciesId));
+    return Collections.unmodifiableList(makers.get(speciesId));
   }
 }

@@ -1,6 +1,7 @@
 package org.foreseal.network;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
@@ -218,7 +219,7 @@ public final class NetworkExpansion {
   }
 
   private static List<Integer> sorted(int[] ids) {
-    return java.util.Arrays.stream(ids).sorted().boxed().toList();
+    return Arrays.stream(ids).sorted().boxed().toList();
   }
 
   private int intern(Molecule molecule, int depth) {

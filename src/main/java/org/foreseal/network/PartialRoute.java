@@ -2,6 +2,7 @@ package org.foreseal.network;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -95,7 +96,7 @@ final class PartialRoute {
       if (ready.isEmpty()) {
         return Optional.empty();
       }
-      ready.sort(java.util.Comparator.comparingInt(Step::id));
+      ready.sort(Comparator.comparingInt(Step::id));
       done.addAll(ready);
       waiting.removeAll(ready);
     }

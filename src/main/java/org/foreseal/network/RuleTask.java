@@ -2,6 +2,7 @@ package org.foreseal.network;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collections;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
@@ -107,7 +108,7 @@ final class RuleTask {
   }
 
   private static int firstNewIn(List<Integer> options, DepthView view) {
-    int at = java.util.Collections.binarySearch(options, view.firstNew());
+    int at = Collections.binarySearch(options, view.firstNew());
     return at >= 0 ? at : -at - 1;
   }
 

@@ -5,7 +5,7 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.List;
 import org.foreseal.report.TextTable.Column;
 import org.foreseal.run.Quantities;
-import org.foreseal.run.RuleCheck;
+import org.foreseal.run.RuleCheckReport;
 import org.foreseal.run.RuleSummary;
 
 /** The rule library, for people, spreadsheets and programs. */
@@ -116,9 +116,9 @@ public final class RulesWriter {
   }
 
   /** The outcome of the self-tests for people. */
-  public static String checkText(RuleCheck check) {
+  public static String checkText(RuleCheckReport check) {
     StringBuilder text = new StringBuilder();
-    for (RuleCheck.Fault fault : check.faults()) {
+    for (RuleCheckReport.Fault fault : check.faults()) {
       String rule = fault.rule().isEmpty() ? "" : fault.rule() + ": ";
       text.append(Wrap.paragraph(fault.place() + ": ", "  ", rule + fault.problem(), WIDTH));
     }
@@ -135,14 +135,14 @@ public final class RulesWriter {
   }
 
   /** The outcome for spreadsheets: one line per fault. */
-  public static String checkCsv(RuleCheck check) {
+  public static String checkCsv(RuleCheckReport check) {
     Csv csv = new Csv(List.of("place", "rule", "problem"));
     check.faults().forEach(f -> csv.line(List.of(f.place(), f.rule(), f.problem())));
     return csv.toString();
   }
 
   /** The outcome for programs. */
-  public static String checkJson(RuleCheck check) {
+  public static String checkJson(RuleCheckReport check) {
     ObjectNode root = Json.object().put("rules", check.rules()).put("examples", check.examples());
     ArrayNode faults = root.putArray("faults");
     check

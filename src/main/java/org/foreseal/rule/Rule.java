@@ -1,6 +1,7 @@
 package org.foreseal.rule;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.Set;
 import org.foreseal.molecule.Molecule;
@@ -107,7 +108,7 @@ public record Rule(
     if (window.forbids(run)) {
       return Optional.of(
           String.format(
-              java.util.Locale.ROOT,
+              Locale.ROOT,
               "only between %.0f and %.0f C",
               window.lowCelsius(),
               window.highCelsius()));

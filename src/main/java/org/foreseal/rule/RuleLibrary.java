@@ -10,6 +10,7 @@ import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.Collections;
 import java.util.HexFormat;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -17,6 +18,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.stream.Stream;
+import org.foreseal.quantity.BadInputException;
 
 /**
  * All rules at hand, in order of file name and place in the file. A user's folder adds rules to the
@@ -79,7 +81,7 @@ public final class RuleLibrary {
   private static void addOnce(Map<String, Rule> rules, Rule rule) {
     Rule earlier = rules.putIfAbsent(rule.id(), rule);
     if (earlier != null) {
-      throw new org.foreseal.quantity.BadInputException(
+      throw new BadInputException(
           rule.place(),
           "rule '" + rule.id() + "' stands also at " + earlier.place().label(),
           "give every rule its own id");
@@ -98,7 +100,7 @@ public final class RuleLibrary {
 
   /** The rules in order. */
   public Collection<Rule> rules() {
-    return java.util.Collections.unmodifiableCollection(rules.values());
+    return Collections.unmodifiableCollection(rules.values());
   }
 
   /** The rule with this id. */

@@ -1,6 +1,7 @@
 package org.foreseal.rule;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
@@ -137,8 +138,7 @@ final class RuleReader {
     throw n.complaint(
         "'" + word + "' is nothing a run can offer",
         "one of "
-            + String.join(
-                ", ", java.util.Arrays.stream(Provision.values()).map(Provision::word).toList()));
+            + String.join(", ", Arrays.stream(Provision.values()).map(Provision::word).toList()));
   }
 
   private static Window window(YamlValue n) {

@@ -41,5 +41,5 @@ public interface Engine {
   List<RuleSummary> rules(Optional<Path> folder);
 
   /** Runs the self-tests of the built-in rules, or of those in a folder. */
-  RuleCheck checkRules(Optional<Path> folder);
+  RuleCheckReport checkRules(Optional<Path> folder);
 }

@@ -1,6 +1,7 @@
 package org.foreseal.run;
 
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -23,7 +24,7 @@ final class Equation {
     List<Molecule> molecules =
         Arrays.stream(ids)
             .mapToObj(id -> network.species().get(id).molecule())
-            .sorted(java.util.Comparator.reverseOrder())
+            .sorted(Comparator.reverseOrder())
             .toList();
     molecules.forEach(m -> counts.merge(m, 1, Integer::sum));
     return counts.entrySet().stream()

@@ -17,6 +17,7 @@ import org.foreseal.network.Species;
 import org.foreseal.network.Step;
 import org.foreseal.rule.Citation;
 import org.foreseal.rule.Rule;
+import org.foreseal.rule.RuleCheck;
 import org.foreseal.rule.RuleLibrary;
 
 /** The pipeline: run sheet to network to ranked candidates. */
@@ -168,15 +169,14 @@ public final class Forecaster implements Engine {
   }
 
   @Override
-  public RuleCheck checkRules(Optional<Path> folder) {
+  public RuleCheckReport checkRules(Optional<Path> folder) {
     RuleLibrary builtIn = RuleLibrary.builtIn();
     RuleLibrary library = folder.map(RunNetwork::own).orElse(builtIn);
     Set<String> known = new LinkedHashSet<>(builtIn.rules().stream().map(Rule::id).toList());
-    List<RuleCheck.Fault> faults =
-        org.foreseal.rule.RuleCheck.run(library, known).stream()
-            .map(f -> new RuleCheck.Fault(f.place().label(), f.rule(), f.problem()))
+    List<RuleCheckReport.Fault> faults =
+        RuleCheck.run(library, known).stream()
+            .map(f -> new RuleCheckReport.Fault(f.place().label(), f.rule(), f.problem()))
             .toList();
-    return new RuleCheck(
-        library.rules().size(), org.foreseal.rule.RuleCheck.count(library), faults);
+    return new RuleCheckReport(library.rules().size(), RuleCheck.count(library), faults);
   }
 }

@@ -3,6 +3,7 @@ package org.foreseal.run;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -13,6 +14,7 @@ import org.foreseal.network.NetworkExpansion;
 import org.foreseal.network.RouteFinder;
 import org.foreseal.quantity.BadInputException;
 import org.foreseal.rule.Rule;
+import org.foreseal.rule.RuleCheck;
 import org.foreseal.rule.RuleLibrary;
 
 /**
@@ -68,7 +70,7 @@ record RunNetwork(
   /** A user's rules take part only when they pass their own self-tests. */
   private static RuleLibrary checked(RuleLibrary own, RuleLibrary builtIn) {
     Set<String> known = builtIn.rules().stream().map(Rule::id).collect(Collectors.toSet());
-    org.foreseal.rule.RuleCheck.run(own, known).stream()
+    RuleCheck.run(own, known).stream()
         .findFirst()
         .ifPresent(
             f -> {
@@ -111,8 +113,6 @@ record RunNetwork(
 
   /** Molecules of a step's side. */
   List<org.foreseal.molecule.Molecule> molecules(int[] ids) {
-    return java.util.Arrays.stream(ids)
-        .mapToObj(id -> network.species().get(id).molecule())
-        .toList();
+    return Arrays.stream(ids).mapToObj(id -> network.species().get(id).molecule()).toList();
   }
 }

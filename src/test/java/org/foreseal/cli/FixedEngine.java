@@ -11,7 +11,7 @@ import org.foreseal.run.Forecast;
 import org.foreseal.run.ForecastOptions;
 import org.foreseal.run.Progress;
 import org.foreseal.run.RouteReport;
-import org.foreseal.run.RuleCheck;
+import org.foreseal.run.RuleCheckReport;
 import org.foreseal.run.RuleSummary;
 import org.foreseal.run.RunSheet;
 import org.foreseal.run.SampleForecasts;
@@ -80,12 +80,13 @@ final class FixedEngine implements Engine {
   }
 
   @Override
-  public RuleCheck checkRules(Optional<Path> folder) {
+  public RuleCheckReport checkRules(Optional<Path> folder) {
     return folder.isEmpty()
-        ? new RuleCheck(2, 6, List.of())
-        : new RuleCheck(
+        ? new RuleCheckReport(2, 6, List.of())
+        : new RuleCheckReport(
             1,
             2,
-            List.of(new RuleCheck.Fault(folder.get() + "/x.yaml:3", "x", "does not balance")));
+            List.of(
+                new RuleCheckReport.Fault(folder.get() + "/x.yaml:3", "x", "does not balance")));
   }
 }

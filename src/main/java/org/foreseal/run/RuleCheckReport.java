@@ -9,9 +9,9 @@ import java.util.List;
  * @param examples number of examples and counter-examples run
  * @param faults what is wrong; empty when all is well
  */
-public record RuleCheck(int rules, int examples, List<Fault> faults) {
+public record RuleCheckReport(int rules, int examples, List<Fault> faults) {
   /** Keeps an unmodifiable copy. */
-  public RuleCheck {
+  public RuleCheckReport {
     faults = List.copyOf(faults);
   }
 
