@@ -59,6 +59,20 @@ class WholeToolTest {
     assertEquals(out, run(readme).out());
   }
 
+  /**
+   * The output printed in the README is what the command prints, up to the place where it is cut.
+   */
+  @Test
+  void printsWhatTheReadmeShows() throws IOException {
+    String readme = Files.readString(Path.of("README.md"));
+    String shown = readme.split("\n```\n", -1)[3];
+    String kept = shown.substring(0, shown.indexOf("\n ..."));
+    assertTrue(kept.startsWith("Forecast: phenylacetic acid with magnetite"), kept);
+    assertTrue(kept.lines().count() > 30, kept);
+    assertEquals(
+        kept, run("forecast", "examples/phenylacetic-acid.yaml").out().substring(0, kept.length()));
+  }
+
   @Test
   void tellsIronOxideFromCorundum() throws IOException {
     JsonNode both =
