@@ -15,6 +15,7 @@ import org.foreseal.network.NetworkDrawing;
 import org.foreseal.network.Route;
 import org.foreseal.network.Species;
 import org.foreseal.network.Step;
+import org.foreseal.rule.Bibliography;
 import org.foreseal.rule.Citation;
 import org.foreseal.rule.Rule;
 import org.foreseal.rule.RuleCheck;
@@ -165,7 +166,10 @@ public final class Forecaster implements Engine {
 
   @Override
   public List<RuleSummary> rules(Optional<Path> folder) {
-    return RunNetwork.library(folder).rules().stream().map(RuleWords::summary).toList();
+    Bibliography references = Bibliography.builtIn();
+    return RunNetwork.library(folder).rules().stream()
+        .map(rule -> RuleWords.summary(rule, references))
+        .toList();
   }
 
   @Override

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import org.foreseal.rule.Bibliography;
 import org.foreseal.rule.Citation;
 import org.foreseal.rule.Guard;
 import org.foreseal.rule.Provision;
@@ -13,7 +14,7 @@ import org.foreseal.rule.Rule;
 final class RuleWords {
   private RuleWords() {}
 
-  static RuleSummary summary(Rule rule) {
+  static RuleSummary summary(Rule rule, Bibliography references) {
     return new RuleSummary(
         rule.id(),
         rule.family(),
@@ -22,7 +23,7 @@ final class RuleWords {
         Optional.of(
             new RuleSummary.Window(rule.window().lowCelsius(), rule.window().highCelsius())),
         rule.prominence(),
-        facts(rule));
+        facts(rule, references));
   }
 
   private static String joined(Set<Provision> all) {
@@ -31,7 +32,7 @@ final class RuleWords {
         : String.join(" + ", all.stream().sorted().map(Provision::word).toList());
   }
 
-  private static List<RuleSummary.Fact> facts(Rule rule) {
+  private static List<RuleSummary.Fact> facts(Rule rule, Bibliography references) {
     List<RuleSummary.Fact> facts = new ArrayList<>();
     add(facts, "applies to", rule.appliesTo());
     add(facts, "reaction", rule.transformation().toString());
@@ -50,7 +51,7 @@ final class RuleWords {
     }
     rule.nearMisses().forEach(m -> add(facts, "near miss", m.reason()));
     for (Citation source : rule.sources()) {
-      add(facts, "source", source.key() + (source.says().isEmpty() ? "" : ": " + source.says()));
+      add(facts, "source", words(source, references));
     }
     rule.examples()
         .forEach(
@@ -63,6 +64,12 @@ final class RuleWords {
     add(facts, "note", rule.note());
     add(facts, "from", rule.place().label());
     return facts;
+  }
+
+  /** The reference where the key resolves, the key itself for a reader's own. */
+  private static String words(Citation source, Bibliography references) {
+    String reference = references.find(source.key()).orElse(source.key());
+    return reference + (source.says().isEmpty() ? "" : ": " + source.says());
   }
 
   private static String joinedOrNothing(Set<Provision> all) {
