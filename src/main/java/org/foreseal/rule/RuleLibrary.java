@@ -1,8 +1,6 @@
 package org.foreseal.rule;
 
 import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -19,6 +17,7 @@ import java.util.Optional;
 import java.util.TreeMap;
 import java.util.stream.Stream;
 import org.foreseal.quantity.BadInputException;
+import org.foreseal.quantity.CsvTable;
 
 /**
  * All rules at hand, in order of file name and place in the file. A user's folder adds rules to the
@@ -38,13 +37,24 @@ public final class RuleLibrary {
     this.digest = digest;
   }
 
-  /** The library in the jar. Its examples are checked by the test suite, not at every start. */
+  /**
+   * The library in the jar, read once. Its examples are checked by the test suite, not at every
+   * start.
+   */
   public static RuleLibrary builtIn() {
-    Map<String, String> files = new TreeMap<>();
-    for (String name : resource(INDEX).lines().filter(l -> !l.isBlank()).toList()) {
-      files.put(name, resource(name));
+    return BuiltIn.LIBRARY;
+  }
+
+  private static final class BuiltIn {
+    static final RuleLibrary LIBRARY = read();
+
+    private static RuleLibrary read() {
+      Map<String, String> files = new TreeMap<>();
+      for (String name : resource(INDEX).lines().filter(l -> !l.isBlank()).toList()) {
+        files.put(name, resource(name));
+      }
+      return of(files);
     }
-    return of(files);
   }
 
   /**
@@ -119,14 +129,7 @@ public final class RuleLibrary {
   }
 
   private static String resource(String name) {
-    try (InputStream in = RuleLibrary.class.getResourceAsStream(FOLDER + name)) {
-      if (in == null) {
-        throw new IllegalStateException("the jar lacks " + FOLDER + name);
-      }
-      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
+    return new String(CsvTable.bytes(FOLDER + name), StandardCharsets.UTF_8);
   }
 
   private static String digestOf(Map<String, String> files) {

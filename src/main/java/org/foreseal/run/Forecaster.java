@@ -2,12 +2,14 @@ package org.foreseal.run;
 
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
+import java.util.TreeSet;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Function;
 import org.foreseal.molecule.Molecule;
@@ -25,6 +27,7 @@ import org.foreseal.rule.RuleLibrary;
 public final class Forecaster implements Engine {
   private static final int ROUTES_DRAWN = 5;
   private static final int MOST_RULED_OUT = 500;
+  private static final int CANDIDATES_EXPLAINED = 20;
   private static final String GAS_PHASE_NOTE =
       "gas-phase Gibbs energies at 1 bar; what water does to them is not in these figures";
   private static final String SCORE_NOTE =
@@ -55,11 +58,14 @@ public final class Forecaster implements Engine {
   public Forecast forecast(RunSheet sheet, ForecastOptions options, Progress progress) {
     RunNetwork run = RunNetwork.grow(sheet, options, energySource, progress);
     progress.report("ranking species", run.network().species().size());
+    List<Candidate> candidates = new CandidateLister(run, sheet, names).list(options.everything());
+    List<String> notes = new ArrayList<>(notes(sheet, run));
+    notes.addAll(weakEstimates(candidates, run.energies()));
     return new Forecast(
         tool(run.library(), sheet),
         sheet,
-        notes(sheet, run),
-        new CandidateLister(run, sheet, names).list(options.everything()),
+        notes,
+        candidates,
         RefusalLister.list(
             run.network(), options.everything() ? Integer.MAX_VALUE : MOST_RULED_OUT, names),
         run.summary());
@@ -79,6 +85,29 @@ public final class Forecaster implements Engine {
               + run.network().stoppedBy()
               + "); what lies beyond is not in the list");
     }
+    return notes;
+  }
+
+  /** Which of the best candidates have a weak Gibbs energy, grouped by what is weak about it. */
+  private static List<String> weakEstimates(List<Candidate> candidates, StepEnergies energies) {
+    Map<String, List<String>> namesByKind = new LinkedHashMap<>();
+    Map<String, Set<String>> termsByKind = new LinkedHashMap<>();
+    for (Candidate c : candidates.subList(0, Math.min(CANDIDATES_EXPLAINED, candidates.size()))) {
+      energies
+          .weakness(c.molecule())
+          .ifPresent(
+              w -> {
+                namesByKind.computeIfAbsent(w.kind(), k -> new ArrayList<>()).add(c.name());
+                termsByKind.computeIfAbsent(w.kind(), k -> new TreeSet<>()).addAll(w.terms());
+              });
+    }
+    List<String> notes = new ArrayList<>();
+    namesByKind.forEach(
+        (kind, names) -> {
+          Set<String> terms = termsByKind.getOrDefault(kind, Set.of());
+          String which = terms.isEmpty() ? "" : " [" + String.join(" ", terms) + "]";
+          notes.add(kind + which + ": " + String.join("; ", names));
+        });
     return notes;
   }
 

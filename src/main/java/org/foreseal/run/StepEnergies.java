@@ -16,4 +16,22 @@ interface StepEnergies {
   default OptionalDouble deltaGibbsValue(List<Molecule> reactants, List<Molecule> products) {
     return deltaGibbs(reactants, products).stream().mapToDouble(Uncertain::value).findFirst();
   }
+
+  /**
+   * What is weak about the estimate for a molecule.
+   *
+   * @param kind in words
+   * @param terms names of the terms at fault, may be empty
+   */
+  record Weakness(String kind, List<String> terms) {
+    /** Keeps an unmodifiable copy. */
+    public Weakness {
+      terms = List.copyOf(terms);
+    }
+  }
+
+  /** What is weak about the estimate for a molecule; nothing when it is sound. */
+  default Optional<Weakness> weakness(Molecule molecule) {
+    return Optional.empty();
+  }
 }

@@ -129,6 +129,11 @@ class ForecasterTest {
       assertTrue(find(forecast, smiles).orElseThrow().rank() <= 12, smiles);
     }
     Candidate ketone = find(forecast, "O=C(Cc1ccccc1)Cc1ccccc1").orElseThrow();
+    assertTrue(
+        forecast.notes().stream()
+            .anyMatch(
+                n -> n.contains("a group is not in the fit") && n.contains("1,3-diphenylacetone")),
+        () -> forecast.notes().toString());
     assertEquals("1,3-diphenylacetone", ketone.name());
     assertEquals(List.of("oxide"), ketone.needs());
     ForecastRoute.Step step = ketone.routes().get(0).steps().get(0);
