@@ -42,6 +42,11 @@ final class GasPhaseEnergies implements StepEnergies {
 
   @Override
   public Optional<Weakness> weakness(Molecule molecule) {
+    if (!GasPhase.covers(temperatureKelvin)) {
+      return Optional.of(
+          new Weakness(
+              "no Gibbs energy, outside the range of the method (25 to 527 C)", List.of()));
+    }
     Estimate<Thermochemistry> estimate = session.of(molecule);
     if (estimate.reason().isPresent()) {
       return Optional.of(new Weakness("no Gibbs energy", List.of(estimate.reason().get())));

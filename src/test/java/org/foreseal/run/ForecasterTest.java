@@ -160,6 +160,21 @@ class ForecasterTest {
   }
 
   @Test
+  void outsideTheRangeOfTheMethodThereAreNoGibbsEnergiesAndANoteSaysSo() {
+    Forecast forecast = forecast(PHENYLACETIC.replace("SOLID", "magnetite").replace("300", "550"));
+    assertTrue(
+        forecast.notes().stream()
+            .anyMatch(n -> n.startsWith("no Gibbs energy, outside the range")));
+    List<ForecastRoute.Step> steps =
+        forecast.candidates().stream()
+            .flatMap(c -> c.routes().stream())
+            .flatMap(r -> r.steps().stream())
+            .toList();
+    assertFalse(steps.isEmpty());
+    assertTrue(steps.stream().allMatch(s -> s.deltaGibbs().isEmpty()));
+  }
+
+  @Test
   void corundumGivesTheKetoneButNoBenzoicAcid() {
     Forecast forecast = forecast(PHENYLACETIC.replace("SOLID", "corundum"));
     assertTrue(find(forecast, "O=C(Cc1ccccc1)Cc1ccccc1").isPresent());
