@@ -22,6 +22,7 @@ public final class Molecule implements Comparable<Molecule> {
   private final int[][] rings;
   private final boolean[][] ringBond;
   private final String key;
+  private final int features;
 
   /** Takes over a prepared skeleton whose atoms are in canonical order. */
   Molecule(Skeleton from, String key) {
@@ -43,6 +44,7 @@ public final class Molecule implements Comparable<Molecule> {
       markRingBonds(ring);
     }
     this.key = key;
+    features = Features.of(from);
   }
 
   private static byte[] bytes(int[] values) {
@@ -60,6 +62,11 @@ public final class Molecule implements Comparable<Molecule> {
       ringBond[a][slotOf(a, b)] = true;
       ringBond[b][slotOf(b, a)] = true;
     }
+  }
+
+  /** Bits of {@link Features}. */
+  int features() {
+    return features;
   }
 
   /** Number of atoms in the graph: heavy atoms, or the one hydrogen of H2 and H+. */

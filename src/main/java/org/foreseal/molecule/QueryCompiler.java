@@ -59,7 +59,8 @@ final class QueryCompiler {
               atomTest(expr),
               atom.getMapIdx(),
               demanded(expr, Expr.Type.FORMAL_CHARGE),
-              element(expr)));
+              element(expr),
+              isAromatic(expr)));
     }
     List<QueryGraph.Bond> bonds = new ArrayList<>();
     for (IBond bond : query.bonds()) {
@@ -80,6 +81,11 @@ final class QueryCompiler {
 
   private static IBond unwrap(IBond bond) {
     return org.openscience.cdk.BondRef.deref(bond);
+  }
+
+  private static boolean isAromatic(Expr expr) {
+    return demanded(expr, Expr.Type.AROMATIC_ELEMENT).isPresent()
+        || demanded(expr, Expr.Type.IS_AROMATIC).isPresent();
   }
 
   private static OptionalInt element(Expr expr) {

@@ -23,8 +23,9 @@ record QueryGraph(List<Atom> atoms, List<Bond> bonds) {
    * @param map map number, 0 for none
    * @param charge formal charge it demands or, in a product, sets
    * @param element atomic number it demands, empty when several fit
+   * @param aromatic whether it demands an aromatic atom
    */
-  record Atom(AtomTest test, int map, OptionalInt charge, OptionalInt element) {
+  record Atom(AtomTest test, int map, OptionalInt charge, OptionalInt element, boolean aromatic) {
     boolean isHydrogen() {
       return element.isPresent() && element.getAsInt() == 1;
     }

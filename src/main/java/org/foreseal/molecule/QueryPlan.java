@@ -14,6 +14,7 @@ final class QueryPlan {
   private static final int UNPLACED = Integer.MIN_VALUE;
 
   private final QueryGraph graph;
+  private final int demanded;
   private final int[] sequence;
   private final int[] parent;
   private final QueryGraph.Bond[] parentBond;
@@ -21,6 +22,7 @@ final class QueryPlan {
 
   private QueryPlan(QueryGraph graph, int anchor) {
     this.graph = graph;
+    demanded = Features.demandedBy(graph);
     int n = graph.atoms().size();
     sequence = new int[n];
     parent = new int[n];
@@ -109,6 +111,9 @@ final class QueryPlan {
 
   /** Calls {@code sink} with the codes of every match, in query order, until it answers true. */
   boolean find(Molecule m, Predicate<int[]> sink) {
+    if ((demanded & ~m.features()) != 0) {
+      return false;
+    }
     int[] placed = new int[sequence.length];
     Arrays.fill(placed, UNPLACED);
     for (int i = 0; i < m.atomCount(); i++) {

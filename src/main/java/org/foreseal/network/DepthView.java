@@ -66,7 +66,7 @@ final class DepthView {
 
   Molecule shared(Molecule molecule) {
     Integer id = ids.get(molecule);
-    if (id != null) {
+    if (id != null && id < species.size()) {
       return species.get(id).molecule();
     }
     Molecule earlier = fresh.putIfAbsent(molecule, molecule);

@@ -2,13 +2,13 @@ package org.foreseal.network;
 
 import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.concurrent.Callable;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -38,7 +38,10 @@ public final class NetworkExpansion {
   private final IntConsumer progress;
 
   private final List<Species> species = new ArrayList<>();
-  private final Map<Molecule, Integer> ids = new HashMap<>();
+
+  /** Grows while slices that look at it are still at work. */
+  private final Map<Molecule, Integer> ids = new ConcurrentHashMap<>();
+
   private final List<Step> steps = new ArrayList<>();
   private final Set<StepIdentity> stepKeys = new HashSet<>();
   private final Map<RefusalIdentity, Refusal> refusals = new LinkedHashMap<>();
@@ -109,8 +112,7 @@ public final class NetworkExpansion {
       }
       List<Species> frozen = List.copyOf(species);
       DepthView view = new DepthView(frozen, from, ids, pruner, deadline);
-      List<List<Found>> results = runAll(tasks, view, pool);
-      boolean outOfTime = mergeAll(results, depth + 1);
+      boolean outOfTime = expand(tasks, view, pool, depth + 1);
       progress.accept(species.size());
       if (outOfTime || speciesLimitReached) {
         String limit =
@@ -134,9 +136,12 @@ public final class NetworkExpansion {
     return new Network(species, steps, open, depth, ending);
   }
 
-  /** For every rule what its slices found, in order. */
-  private static List<List<Found>> runAll(
-      List<RuleTask> tasks, DepthView view, ExecutorService pool) {
+  /**
+   * Expands one depth. Slices run at the same time; what they found is merged in the order of rules
+   * and slices as it comes in, and once a limit is reached the rest is given up. Answers whether
+   * the time ran out.
+   */
+  private boolean expand(List<RuleTask> tasks, DepthView view, ExecutorService pool, int depth) {
     try {
       List<Callable<Boolean>> scans = new ArrayList<>();
       tasks.forEach(task -> scans.add(() -> scanned(task, view)));
@@ -147,15 +152,12 @@ public final class NetworkExpansion {
       for (RuleTask task : tasks) {
         futures.add(task.slices(view).stream().map(pool::submit).toList());
       }
-      List<List<Found>> results = new ArrayList<>();
       for (List<Future<Found>> slices : futures) {
-        List<Found> found = new ArrayList<>();
-        for (Future<Found> slice : slices) {
-          found.add(slice.get());
+        if (mergeRule(slices, depth)) {
+          return true;
         }
-        results.add(found);
       }
-      return results;
+      return false;
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
       throw new IllegalStateException("interrupted while the network grew", e);
@@ -169,15 +171,17 @@ public final class NetworkExpansion {
     return true;
   }
 
-  /** Numbers species and steps in the order of the rules; answers whether the time ran out. */
-  private boolean mergeAll(List<List<Found>> results, int depth) {
-    for (List<Found> slices : results) {
-      int tried = 0;
-      for (Found found : slices) {
-        if (tried > limits.pairsPerRule()) {
-          overBudget = true;
-          break;
-        }
+  /** Numbers species and steps of one rule; answers whether the time ran out. */
+  private boolean mergeRule(List<Future<Found>> slices, int depth)
+      throws InterruptedException, ExecutionException {
+    int tried = 0;
+    for (Future<Found> slice : slices) {
+      boolean exhausted = tried > limits.pairsPerRule();
+      overBudget |= exhausted;
+      if (exhausted || speciesLimitReached) {
+        slice.cancel(false);
+      } else {
+        Found found = slice.get();
         tried += found.tried();
         found.refusals().forEach(this::remember);
         found.proposals().forEach(proposal -> merge(proposal, depth));
