@@ -22,7 +22,7 @@ class LargeNetworkTimingTest {
     long start = System.nanoTime();
     Network network =
         Networks.grow(
-            Limits.ofDepth(4).withSpecies(50_000),
+            Limits.ofDepth(5).withSpecies(50_000),
             offered,
             "CCC=CCC=CCC=CCCCCCC(=O)O",
             "O=C(CCc1ccccc1)CCc1ccccc1");
