@@ -30,6 +30,7 @@ import org.foreseal.rule.Surroundings;
  */
 public final class NetworkExpansion {
   private static final int MOST_REFUSALS = 20_000;
+  private static final int RULES_AT_A_TIME = 24;
 
   private final RuleLibrary library;
   private final Surroundings surroundings;
@@ -137,23 +138,15 @@ public final class NetworkExpansion {
   }
 
   /**
-   * Expands one depth. Slices run at the same time; what they found is merged in the order of rules
-   * and slices as it comes in, and once a limit is reached the rest is given up. Answers whether
-   * the time ran out.
+   * Expands one depth, a few rules at a time. Slices run at the same time; what they found is
+   * merged in the order of rules and slices as it comes in, and once a limit is reached the rest is
+   * given up. Answers whether the time ran out.
    */
   private boolean expand(List<RuleTask> tasks, DepthView view, ExecutorService pool, int depth) {
     try {
-      List<Callable<Boolean>> scans = new ArrayList<>();
-      tasks.forEach(task -> scans.add(() -> scanned(task, view)));
-      for (Future<Boolean> scan : pool.invokeAll(scans)) {
-        scan.get();
-      }
-      List<List<Future<Found>>> futures = new ArrayList<>();
-      for (RuleTask task : tasks) {
-        futures.add(task.slices(view).stream().map(pool::submit).toList());
-      }
-      for (List<Future<Found>> slices : futures) {
-        if (mergeRule(slices, depth)) {
+      for (int from = 0; from < tasks.size() && !speciesLimitReached; from += RULES_AT_A_TIME) {
+        List<RuleTask> some = tasks.subList(from, Math.min(from + RULES_AT_A_TIME, tasks.size()));
+        if (expandSome(some, view, pool, depth)) {
           return true;
         }
       }
@@ -164,6 +157,25 @@ public final class NetworkExpansion {
     } catch (ExecutionException e) {
       throw new IllegalStateException("a rule failed while the network grew", e.getCause());
     }
+  }
+
+  private boolean expandSome(List<RuleTask> tasks, DepthView view, ExecutorService pool, int depth)
+      throws InterruptedException, ExecutionException {
+    List<Callable<Boolean>> scans = new ArrayList<>();
+    tasks.forEach(task -> scans.add(() -> scanned(task, view)));
+    for (Future<Boolean> scan : pool.invokeAll(scans)) {
+      scan.get();
+    }
+    List<List<Future<Found>>> futures = new ArrayList<>();
+    for (RuleTask task : tasks) {
+      futures.add(task.slices(view).stream().map(pool::submit).toList());
+    }
+    for (List<Future<Found>> slices : futures) {
+      if (mergeRule(slices, depth)) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private static boolean scanned(RuleTask task, DepthView view) {
