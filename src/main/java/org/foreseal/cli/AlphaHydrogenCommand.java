@@ -12,7 +12,6 @@ import org.foreseal.report.AlphaHydrogenWriter;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
@@ -47,16 +46,12 @@ final class AlphaHydrogenCommand implements Callable<Integer> {
       description = "Carboxylic acids, by name or SMILES.")
   private List<String> acids = new ArrayList<>();
 
-  @Option(
-      names = "--format",
-      paramLabel = "FORMAT",
-      defaultValue = "text",
-      description = "text (default), csv or json.")
-  private OutputFormat format = OutputFormat.TEXT;
+  @Mixin private ResultFormat format;
 
   AlphaHydrogenCommand(Session session) {
     this.session = session;
     this.common = new CommonOptions();
+    this.format = new ResultFormat();
   }
 
   @Override
@@ -71,7 +66,7 @@ final class AlphaHydrogenCommand implements Callable<Integer> {
     }
     AlphaHydrogenReport report = new AlphaHydrogenCheck(session.names()::display).check(given);
     console.result(
-        switch (format) {
+        switch (format.chosen()) {
           case TEXT -> AlphaHydrogenWriter.text(report);
           case CSV -> AlphaHydrogenWriter.csv(report);
           case JSON -> AlphaHydrogenWriter.json(report);

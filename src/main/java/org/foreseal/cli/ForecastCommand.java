@@ -52,12 +52,7 @@ final class ForecastCommand implements Callable<Integer> {
   @Mixin private RunArguments run;
   @Mixin private CommonOptions common;
 
-  @Option(
-      names = "--format",
-      paramLabel = "FORMAT",
-      defaultValue = "text",
-      description = "text (default), csv or json.")
-  private OutputFormat format = OutputFormat.TEXT;
+  @Mixin private ResultFormat format;
 
   @Option(names = "--all", description = "List every product, however unlikely.")
   private boolean everything;
@@ -66,6 +61,7 @@ final class ForecastCommand implements Callable<Integer> {
     this.session = session;
     this.run = new RunArguments();
     this.common = new CommonOptions();
+    this.format = new ResultFormat();
   }
 
   @Override
@@ -88,14 +84,14 @@ final class ForecastCommand implements Callable<Integer> {
     int rows = everything ? Integer.MAX_VALUE : USUAL_ROWS;
     if (runs.size() > 1) {
       Comparison comparison = new Comparison(runs);
-      return switch (format) {
+      return switch (format.chosen()) {
         case TEXT -> ComparisonWriter.text(comparison, rows);
         case CSV -> ComparisonWriter.csv(comparison);
         case JSON -> ComparisonWriter.json(comparison);
       };
     }
     Forecast forecast = runs.get(0).forecast();
-    return switch (format) {
+    return switch (format.chosen()) {
       case TEXT -> ForecastTextWriter.write(forecast, rows);
       case CSV -> ForecastCsvWriter.write(forecast);
       case JSON -> ForecastJsonWriter.write(forecast);

@@ -63,16 +63,12 @@ final class RulesCommand implements Callable<Integer> {
       description = "Your own rules: they add to or replace built-in ones.")
   private @Nullable Path folder;
 
-  @Option(
-      names = "--format",
-      paramLabel = "FORMAT",
-      defaultValue = "text",
-      description = "text (default), csv or json.")
-  private OutputFormat format = OutputFormat.TEXT;
+  @Mixin private ResultFormat format;
 
   RulesCommand(Session session) {
     this.session = session;
     this.common = new CommonOptions();
+    this.format = new ResultFormat();
   }
 
   @Override
@@ -99,7 +95,7 @@ final class RulesCommand implements Callable<Integer> {
     }
     List<RuleSummary> rules = session.engine().get().rules(Optional.ofNullable(folder));
     console.result(
-        switch (format) {
+        switch (format.chosen()) {
           case TEXT -> RulesWriter.listText(rules);
           case CSV -> RulesWriter.listCsv(rules);
           case JSON -> RulesWriter.listJson(rules);
@@ -116,7 +112,7 @@ final class RulesCommand implements Callable<Integer> {
             .findFirst()
             .orElseThrow(() -> unknown(id, rules));
     console.result(
-        switch (format) {
+        switch (format.chosen()) {
           case TEXT -> RulesWriter.text(rule);
           case CSV -> RulesWriter.csv(rule);
           case JSON -> RulesWriter.json(rule);
@@ -139,7 +135,7 @@ final class RulesCommand implements Callable<Integer> {
         Optional.ofNullable(argument).map(Path::of).or(() -> Optional.ofNullable(folder));
     RuleCheckReport result = session.engine().get().checkRules(checked);
     console.result(
-        switch (format) {
+        switch (format.chosen()) {
           case TEXT -> RulesWriter.checkText(result);
           case CSV -> RulesWriter.checkCsv(result);
           case JSON -> RulesWriter.checkJson(result);

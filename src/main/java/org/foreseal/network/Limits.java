@@ -45,11 +45,6 @@ public record Limits(
     }
   }
 
-  /** The same with another depth. */
-  public Limits withDepth(int other) {
-    return new Limits(other, species, heavyAtoms, carbons, pairsPerRule, wallTime, threads);
-  }
-
   /** The same with another number of threads. */
   public Limits withThreads(int other) {
     return new Limits(depth, species, heavyAtoms, carbons, pairsPerRule, wallTime, other);

@@ -1,6 +1,7 @@
 package org.foreseal.network;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Collections;
 import java.util.HashMap;
 import java.util.List;
@@ -85,6 +86,20 @@ public final class Network {
   /** The species of this structure. */
   public Optional<Species> find(Molecule molecule) {
     return Optional.ofNullable(byMolecule.get(molecule));
+  }
+
+  /** The molecules a step consumes, in the order of the rule's pieces. */
+  public List<Molecule> reactantsOf(Step step) {
+    return molecules(step.reactants());
+  }
+
+  /** The molecules a step forms. */
+  public List<Molecule> productsOf(Step step) {
+    return molecules(step.products());
+  }
+
+  private List<Molecule> molecules(int[] ids) {
+    return Arrays.stream(ids).mapToObj(id -> species.get(id).molecule()).toList();
   }
 
   /** The steps that form this species. */

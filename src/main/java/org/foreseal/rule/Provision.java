@@ -1,6 +1,8 @@
 package org.foreseal.rule;
 
+import java.util.Arrays;
 import java.util.Locale;
+import java.util.Optional;
 
 /**
  * What a run can offer a reaction: the roles of its solids and additives, and what the medium
@@ -46,5 +48,11 @@ public enum Provision {
   /** The word of the run sheet and the rule files. */
   public String word() {
     return name().toLowerCase(Locale.ROOT).replace('_', '-');
+  }
+
+  /** The provision of this word, whatever its case. */
+  public static Optional<Provision> of(String word) {
+    String wanted = word.strip().toLowerCase(Locale.ROOT);
+    return Arrays.stream(values()).filter(p -> p.word().equals(wanted)).findFirst();
   }
 }

@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.HashSet;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
@@ -129,16 +128,15 @@ final class RuleReader {
   }
 
   static Provision provision(YamlValue n) {
-    String word = n.text();
-    for (Provision p : Provision.values()) {
-      if (p.word().equals(word.toLowerCase(Locale.ROOT))) {
-        return p;
-      }
-    }
-    throw n.complaint(
-        "'" + word + "' is nothing a run can offer",
-        "one of "
-            + String.join(", ", Arrays.stream(Provision.values()).map(Provision::word).toList()));
+    return Provision.of(n.text())
+        .orElseThrow(
+            () ->
+                n.complaint(
+                    "'" + n.text() + "' is nothing a run can offer",
+                    "one of "
+                        + String.join(
+                            ", ",
+                            Arrays.stream(Provision.values()).map(Provision::word).toList())));
   }
 
   private static Window window(YamlValue n) {

@@ -1,7 +1,6 @@
 package org.foreseal.run;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -147,7 +146,7 @@ final class CandidateLister {
 
   private ForecastRoute.Step step(Step step) {
     Optional<Uncertain> gibbs =
-        run.energies().deltaGibbs(run.molecules(step.reactants()), run.molecules(step.products()));
+        run.energies().deltaGibbs(run.network().reactantsOf(step), run.network().productsOf(step));
     return new ForecastRoute.Step(
         step.rule().id(),
         step.rule().title(),
@@ -164,11 +163,7 @@ final class CandidateLister {
         .filter(p -> p != Provision.WATER && p != Provision.HYDROGEN)
         .sorted()
         .forEach(p -> words.add(p.word()));
-    boolean consumesHydrogen =
-        Arrays.stream(step.reactants())
-            .anyMatch(
-                r -> run.network().species().get(r).molecule().equals(AmbientSpecies.HYDROGEN));
-    if (consumesHydrogen) {
+    if (run.network().reactantsOf(step).contains(AmbientSpecies.HYDROGEN)) {
       words.add("hydrogen");
     }
     return List.copyOf(words);

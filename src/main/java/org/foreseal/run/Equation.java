@@ -1,6 +1,5 @@
 package org.foreseal.run;
 
-import java.util.Arrays;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -16,17 +15,14 @@ final class Equation {
   private Equation() {}
 
   static String of(Network network, Step step, Function<Molecule, String> name) {
-    return side(network, step.reactants(), name) + " = " + side(network, step.products(), name);
+    return side(network.reactantsOf(step), name) + " = " + side(network.productsOf(step), name);
   }
 
-  private static String side(Network network, int[] ids, Function<Molecule, String> name) {
+  private static String side(List<Molecule> molecules, Function<Molecule, String> name) {
     Map<Molecule, Integer> counts = new LinkedHashMap<>();
-    List<Molecule> molecules =
-        Arrays.stream(ids)
-            .mapToObj(id -> network.species().get(id).molecule())
-            .sorted(Comparator.reverseOrder())
-            .toList();
-    molecules.forEach(m -> counts.merge(m, 1, Integer::sum));
+    molecules.stream()
+        .sorted(Comparator.reverseOrder())
+        .forEach(m -> counts.merge(m, 1, Integer::sum));
     return counts.entrySet().stream()
         .map(e -> (e.getValue() > 1 ? e.getValue() + " " : "") + name.apply(e.getKey()))
         .collect(Collectors.joining(" + "));

@@ -1,7 +1,5 @@
 package org.foreseal.run;
 
-import java.util.Arrays;
-import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.foreseal.chromatography.WorkUp;
@@ -76,9 +74,7 @@ final class PlausibilityRanking implements Ranking {
   }
 
   private double hydrogenFactor(Step step) {
-    boolean consumes =
-        Arrays.stream(step.reactants())
-            .anyMatch(r -> network.species().get(r).molecule().equals(AmbientSpecies.HYDROGEN));
+    boolean consumes = network.reactantsOf(step).contains(AmbientSpecies.HYDROGEN);
     if (!consumes || hasStrongHydrogen()) {
       return 1;
     }
@@ -97,15 +93,11 @@ final class PlausibilityRanking implements Ranking {
 
   private double energyFactor(Step step) {
     Optional<Uncertain> gibbs =
-        energies.deltaGibbs(molecules(step.reactants()), molecules(step.products()));
+        energies.deltaGibbs(network.reactantsOf(step), network.productsOf(step));
     if (gibbs.isEmpty()) {
       return UNKNOWN_ENERGY;
     }
     double width = Math.max(NARROWEST_KILOJOULES, gibbs.get().standardDeviation());
     return 1 / (1 + Math.exp((gibbs.get().value() - MIDDLE_KILOJOULES) / width));
-  }
-
-  private List<Molecule> molecules(int[] ids) {
-    return Arrays.stream(ids).mapToObj(id -> network.species().get(id).molecule()).toList();
   }
 }

@@ -3,7 +3,6 @@ package org.foreseal.run;
 import java.util.Arrays;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.Set;
 import org.foreseal.molecule.Molecule;
@@ -33,10 +32,7 @@ final class Roles {
   }
 
   static Optional<Provision> find(String word) {
-    String wanted = word.strip().toLowerCase(Locale.ROOT);
-    return Arrays.stream(Provision.values())
-        .filter(p -> !NOT_FROM_A_MATERIAL.contains(p) && p.word().equals(wanted))
-        .findFirst();
+    return Provision.of(word).filter(p -> !NOT_FROM_A_MATERIAL.contains(p));
   }
 
   static Provision read(String word, Place place) {

@@ -3,8 +3,6 @@ package org.foreseal.run;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
-import java.util.Arrays;
-import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Collectors;
@@ -109,10 +107,5 @@ record RunNetwork(
         network.depth(),
         network.stoppedBy(),
         network.isCut());
-  }
-
-  /** Molecules of a step's side. */
-  List<org.foreseal.molecule.Molecule> molecules(int[] ids) {
-    return Arrays.stream(ids).mapToObj(id -> network.species().get(id).molecule()).toList();
   }
 }

@@ -115,25 +115,16 @@ public record RunSheet(
         .toList();
   }
 
-  /** The same run with other solids. */
-  public RunSheet withSolids(List<Solid> otherSolids) {
-    return with(otherSolids, temperatureCelsius);
-  }
-
   /** The same run at one temperature, C. */
   public RunSheet atCelsius(double temperature) {
-    return with(solids, List.of(temperature));
-  }
-
-  private RunSheet with(List<Solid> otherSolids, List<Double> otherTemperatures) {
     return new RunSheet(
         title,
         substrates,
         inWater,
         waterGrams,
-        otherSolids,
+        solids,
         additives,
-        otherTemperatures,
+        List.of(temperature),
         pressureBar,
         durationHours,
         depth,

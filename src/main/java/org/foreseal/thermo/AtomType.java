@@ -85,10 +85,6 @@ enum AtomType {
     return this == FUSED || this == FUSED_FIVE_RING;
   }
 
-  boolean isAromaticHetero() {
-    return this == PYRIDINE || this == PYRROLE || this == FURAN || this == THIOPHENE;
-  }
-
   /** Amine nitrogen or singly bonded oxygen. */
   boolean isAmineOrOxygen() {
     return this == AMINE || this == OXYGEN;

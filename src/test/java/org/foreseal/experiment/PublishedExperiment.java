@@ -8,7 +8,6 @@ import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
@@ -140,7 +139,7 @@ record PublishedExperiment(
   private static Set<Provision> roles(YamlValue n) {
     Set<Provision> roles = EnumSet.noneOf(Provision.class);
     for (YamlValue word : n.itemsOf("actsAs")) {
-      roles.add(Provision.valueOf(word.text().toUpperCase(Locale.ROOT).replace('-', '_')));
+      roles.add(Provision.of(word.text()).orElseThrow());
     }
     return roles;
   }
